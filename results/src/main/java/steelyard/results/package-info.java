@@ -1,0 +1,2 @@
+/** What runs say: the ledger, statistics over it, decisions and the brief. */
+package steelyard.results;

@@ -1,0 +1,2 @@
+/** What is compared: the internal model, families of problems, their instances and formats. */
+package steelyard.variants;
