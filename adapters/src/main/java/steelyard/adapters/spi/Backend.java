@@ -1,0 +1,21 @@
+package steelyard.adapters.spi;
+
+import steelyard.variants.model.Model;
+
+/**
+ * A solver technology behind one adapter; found through {@link java.util.ServiceLoader}. The class
+ * names no type of its solver library, in no field, signature or lambda, so that it loads and
+ * describes itself where the library is missing.
+ */
+public interface Backend {
+  Description describe();
+
+  /**
+   * Makes of {@code model} what the solver reads. Lowers {@link Model#lowered()} only.
+   *
+   * @param model already permuted for the seed: adapters do not shuffle
+   * @param monitor told of phases and counters while lowering
+   * @return a lowering to solve once, or a refusal that names what cannot be lowered
+   */
+  Lowered lower(Model model, SolveRequest request, Monitor monitor);
+}

@@ -1,0 +1,20 @@
+package steelyard.adapters.spi;
+
+import java.util.Objects;
+
+/**
+ * How to solve.
+ *
+ * @param seed 0 is what the service will run; for the library's own random choices, the model is
+ *     permuted already
+ * @param threads at least 1
+ */
+public record SolveRequest(Settings settings, long seed, int threads, Deadline deadline) {
+  public SolveRequest {
+    Objects.requireNonNull(settings, "settings");
+    Objects.requireNonNull(deadline, "deadline");
+    if (threads < 1) {
+      throw new IllegalArgumentException("at least one thread, not " + threads);
+    }
+  }
+}
