@@ -1,0 +1,26 @@
+package steelyard.results.ledger;
+
+import java.io.IOException;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.FileSystemException;
+import java.nio.file.NoSuchFileException;
+import java.nio.file.NotDirectoryException;
+
+/** Says why a file operation failed; exceptions of the library often say no more than the path. */
+final class Reasons {
+
+  private Reasons() {}
+
+  static String of(IOException e) {
+    if (e instanceof NoSuchFileException || e instanceof NotDirectoryException) {
+      return "no such folder or file";
+    }
+    if (e instanceof AccessDeniedException) {
+      return "permission denied";
+    }
+    if (e instanceof FileSystemException f && f.getReason() != null) {
+      return f.getReason();
+    }
+    return e.getMessage() == null ? e.getClass().getSimpleName() : e.getMessage();
+  }
+}
