@@ -1,0 +1,21 @@
+package steelyard.adapters.spi;
+
+import java.util.List;
+import java.util.Objects;
+import steelyard.variants.model.Clause;
+import steelyard.variants.model.Definition;
+
+/**
+ * A constraint said with total definitions and clauses alone.
+ *
+ * @param how the decomposition's name and published source
+ * @param definitions of fresh variables, as in {@link Truth}
+ * @param asserted what must hold; none where the constraint always does
+ */
+public record Reduction(String how, List<Definition> definitions, List<Clause> asserted) {
+  public Reduction {
+    Objects.requireNonNull(how, "how");
+    definitions = List.copyOf(definitions);
+    asserted = List.copyOf(asserted);
+  }
+}
