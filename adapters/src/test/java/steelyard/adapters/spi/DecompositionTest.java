@@ -1,0 +1,149 @@
+package steelyard.adapters.spi;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.stream.IntStream;
+import java.util.stream.LongStream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.FieldSource;
+import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.Atom;
+import steelyard.variants.model.Clause;
+import steelyard.variants.model.Conditional;
+import steelyard.variants.model.Constraint;
+import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.Definition;
+import steelyard.variants.model.Domain;
+import steelyard.variants.model.Element;
+import steelyard.variants.model.Ints;
+import steelyard.variants.model.Linear;
+import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.Relation;
+import steelyard.variants.model.Task;
+import steelyard.variants.model.Tasks;
+import steelyard.variants.model.Variables;
+import steelyard.variants.model.View;
+import steelyard.variants.model.Views;
+import steelyard.variants.model.judge.FlatJudge;
+
+/** Each truth and reduction against the judge, on every assignment of small domains. */
+class DecompositionTest {
+  @ParameterizedTest
+  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  void truthHoldsExactlyWhereTheRelationDoes(String kind) {
+    LongStream.range(0, 80)
+        .forEach(
+            seed -> {
+              RandomRelations made = new RandomRelations(seed, 3);
+              Relation relation = made.relation(kind);
+              Fresh fresh = fresh(made.domains());
+              Truth truth = Decomposition.of(relation, fresh);
+              assertAgrees(made.domains(), fresh, relation, truth.definitions(), truth.holds());
+            });
+  }
+
+  @ParameterizedTest
+  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  void reductionHoldsExactlyWhereTheConditionalDoes(String kind) {
+    LongStream.range(0, 30)
+        .forEach(
+            seed -> {
+              RandomRelations made = new RandomRelations(1_000 + seed, 3);
+              Relation relation = made.relation(kind);
+              for (Atom when : List.of(Atom.TRUE, Atom.FALSE, made.atom(), made.atom())) {
+                for (Conditional.Mode mode : Conditional.Mode.values()) {
+                  assertReduces(made.domains(), new Conditional(when, mode, relation));
+                }
+              }
+            });
+  }
+
+  @ParameterizedTest
+  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  void definesInThreeShapesOnly(String kind) {
+    for (long seed = 0; seed < 100; seed++) {
+      RandomRelations made = new RandomRelations(seed, 4);
+      Truth truth = Decomposition.of(made.relation(kind), fresh(made.domains()));
+      assertThat(truth.definitions()).as("seed %s", seed).allMatch(DecompositionTest::isBase);
+    }
+  }
+
+  @Test
+  void needsNoDefinition_whereDomainsDecide() {
+    Fresh fresh = fresh(List.of(Domain.between(0, 3), Domain.between(5, 9)));
+    Truth truth = Decomposition.of(AllDifferent.of(View.of(0), View.of(1)), fresh);
+    assertThat(truth.definitions()).isEmpty();
+    assertThat(truth.holds()).isEmpty();
+  }
+
+  @Test
+  void needsNoDefinition_whereOneVariableDecides() {
+    Fresh fresh = fresh(List.of(Domain.between(0, 9)));
+    NoOverlap pair = NoOverlap.of(Task.fixed(View.of(0), 3), Task.fixed(View.constant(4), 2));
+    Truth truth = Decomposition.of(pair, fresh);
+    assertThat(truth.definitions()).isEmpty();
+    assertThat(truth.holds()).containsExactly(Clause.of(Atom.atMost(0, 1), Atom.atLeast(0, 6)));
+  }
+
+  @Test
+  void saysNothingOfTheCapacity_whereNoTaskRuns() {
+    Fresh fresh = fresh(List.of(Domain.BOOLEAN));
+    Task absentUnless =
+        new Task(View.constant(2), View.constant(3), View.constant(5), Atom.is(0, 1));
+    Cumulative short0 =
+        new Cumulative(Tasks.of(absentUnless), Views.ofConstants(0), View.constant(-1));
+    assertThat(Decomposition.of(short0, fresh).holds())
+        .containsExactly(Clause.of(Atom.isNot(0, 1)));
+  }
+
+  private static void assertReduces(List<Domain> domains, Conditional constraint) {
+    Fresh fresh = fresh(domains);
+    Reduction reduction = Decomposition.of(constraint, fresh);
+    assertAgrees(domains, fresh, constraint, reduction.definitions(), reduction.asserted());
+  }
+
+  /** FlatJudge insists that each definition leaves exactly one value. */
+  private static void assertAgrees(
+      List<Domain> domains,
+      Fresh fresh,
+      Constraint constraint,
+      List<Definition> definitions,
+      List<Clause> clauses) {
+    List<Ints> wrong =
+        AllAssignments.of(
+            domains,
+            assignment -> {
+              FlatJudge judge = new FlatJudge(Arrays.copyOf(assignment, fresh.size()));
+              judge.complete(definitions, fresh::domain);
+              return clauses.stream().allMatch(judge.relations()::holds)
+                  != judge.relations().holds(constraint);
+            });
+    assertThat(wrong)
+        .as("%s over %s by %s, %s", constraint, domains, definitions, clauses)
+        .isEmpty();
+  }
+
+  private static boolean isBase(Definition definition) {
+    if (definition.constraint() instanceof Element choice) {
+      return choice.array().size() == 2 && choice.result().equals(View.of(definition.variable()));
+    }
+    return definition.constraint() instanceof Conditional reified
+        && reified.mode() == Conditional.Mode.IFF
+        && reified.when().variable() == definition.variable()
+        && (reified.then() instanceof Linear || reified.then() instanceof Clause);
+  }
+
+  private static Fresh fresh(List<Domain> domains) {
+    List<Variables.Variable> variables = new ArrayList<>();
+    IntStream.range(0, domains.size())
+        .forEach(
+            v ->
+                variables.add(
+                    new Variables.Variable("x" + v, domains.get(v), Variables.Kind.DECISION)));
+    return Fresh.beside(Variables.of(variables));
+  }
+}

@@ -1,0 +1,196 @@
+package steelyard.adapters.spi;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.function.Supplier;
+import java.util.stream.IntStream;
+import org.apache.commons.rng.UniformRandomProvider;
+import org.apache.commons.rng.core.source64.SplitMix64;
+import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.Atom;
+import steelyard.variants.model.Atoms;
+import steelyard.variants.model.BinPacking;
+import steelyard.variants.model.Clause;
+import steelyard.variants.model.Comparison;
+import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.Domain;
+import steelyard.variants.model.Element;
+import steelyard.variants.model.Ints;
+import steelyard.variants.model.Linear;
+import steelyard.variants.model.LinearSum;
+import steelyard.variants.model.Longs;
+import steelyard.variants.model.Maximum;
+import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.Relation;
+import steelyard.variants.model.Table;
+import steelyard.variants.model.Task;
+import steelyard.variants.model.Tasks;
+import steelyard.variants.model.Tuples;
+import steelyard.variants.model.View;
+import steelyard.variants.model.Views;
+
+/**
+ * Random small relations of every kind for exhaustive checks: holes and negative values in domains,
+ * constants and repeated variables in scopes, indices outside arrays, empty tables, absent tasks.
+ */
+public final class RandomRelations {
+  /** The names of the kinds, as {@link Relation#kind()} gives them. */
+  public static final List<String> KINDS =
+      List.of(
+          "linear",
+          "clause",
+          "all-different",
+          "element",
+          "table",
+          "maximum",
+          "no-overlap",
+          "cumulative",
+          "bin-packing");
+
+  private final UniformRandomProvider random;
+  private final List<Domain> domains;
+
+  /** Relations over {@code variables} new random domains. */
+  public RandomRelations(long seed, int variables) {
+    this.random = new SplitMix64(seed);
+    this.domains = Collections.unmodifiableList(some(variables, this::domain));
+  }
+
+  public List<Domain> domains() {
+    return domains;
+  }
+
+  public Relation relation(String kind) {
+    return switch (kind) {
+      case "linear" -> linear();
+      case "clause" -> new Clause(Atoms.of(some(random.nextInt(4), this::atom)));
+      case "all-different" -> new AllDifferent(views(random.nextInt(5)));
+      case "element" -> new Element(views(random.nextInt(5)), view(), view());
+      case "table" -> table();
+      case "maximum" -> new Maximum(views(1 + random.nextInt(4)), view());
+      case "no-overlap" -> new NoOverlap(tasks(random.nextInt(4)));
+      case "cumulative" -> cumulative(random.nextInt(4));
+      case "bin-packing" -> binPacking(random.nextInt(5), random.nextInt(4));
+      default -> throw new IllegalArgumentException(kind);
+    };
+  }
+
+  /** Often a literal of a variable, at times a constant. */
+  public Atom atom() {
+    if (random.nextInt(6) == 0) {
+      return Atom.constant(random.nextBoolean());
+    }
+    Atom.Op op = pick(List.of(Atom.Op.values()));
+    return new Atom(random.nextInt(domains.size()), op, between(-4, 5));
+  }
+
+  private Domain domain() {
+    return switch (random.nextInt(4)) {
+      case 0 -> Domain.BOOLEAN;
+      case 1 -> Domain.of(IntStream.range(0, 3).map(i -> between(-3, 4)));
+      default -> {
+        int min = between(-2, 2);
+        yield Domain.between(min, min + random.nextInt(4));
+      }
+    };
+  }
+
+  private Relation linear() {
+    int[] scope = IntStream.range(0, domains.size()).filter(v -> random.nextInt(4) > 0).toArray();
+    long[] factors = new long[scope.length];
+    boolean unit = random.nextBoolean();
+    for (int i = 0; i < factors.length; i++) {
+      long size = unit ? 1 : between(1, 4);
+      factors[i] = random.nextBoolean() ? size : -size;
+    }
+    Comparison op = pick(List.of(Comparison.values()));
+    return new Linear(new LinearSum(Ints.of(scope), Longs.of(factors), 0), op, between(-6, 8));
+  }
+
+  private Relation table() {
+    int arity = random.nextInt(4);
+    List<int[]> rows = some(random.nextInt(6), () -> row(arity));
+    Table.Polarity polarity =
+        random.nextBoolean() ? Table.Polarity.ALLOWED : Table.Polarity.FORBIDDEN;
+    return new Table(views(arity), Tuples.of(arity, rows), polarity);
+  }
+
+  private int[] row(int arity) {
+    return IntStream.range(0, arity)
+        .map(c -> random.nextInt(5) == 0 ? Tuples.ANY : between(-2, 3))
+        .toArray();
+  }
+
+  private Relation cumulative(int tasks) {
+    Views demands = Views.of(some(tasks, this::amount));
+    return new Cumulative(tasks(tasks), demands, random.nextBoolean() ? amount() : view());
+  }
+
+  private Relation binPacking(int items, int bins) {
+    long[] sizes = new long[items];
+    for (int i = 0; i < items; i++) {
+      sizes[i] = random.nextInt(4);
+    }
+    return new BinPacking(
+        Views.of(some(items, this::amount)),
+        Longs.of(sizes),
+        Views.of(some(bins, () -> random.nextInt(3) == 0 ? amount() : view())));
+  }
+
+  private Tasks tasks(int size) {
+    return Tasks.of(some(size, this::task));
+  }
+
+  private Task task() {
+    View start = view();
+    View duration = amount();
+    View end =
+        duration.isConstant() && random.nextInt(4) > 0 ? start.shifted(duration.offset()) : view();
+    return new Task(start, duration, end, random.nextBoolean() ? Atom.TRUE : atom());
+  }
+
+  private Views views(int size) {
+    return Views.of(some(size, this::view));
+  }
+
+  private View view() {
+    if (random.nextInt(6) == 0) {
+      return View.constant(between(-2, 3));
+    }
+    View view = View.of(random.nextInt(domains.size()));
+    return switch (random.nextInt(4)) {
+      case 0 -> view.negated().shifted(between(-1, 3));
+      case 1 -> view.shifted(between(-2, 2));
+      default -> view;
+    };
+  }
+
+  /** A view that is never negative. */
+  private View amount() {
+    if (random.nextBoolean()) {
+      return View.constant(random.nextInt(4));
+    }
+    int variable = random.nextInt(domains.size());
+    Domain domain = domains.get(variable);
+    return random.nextInt(3) == 0
+        ? View.of(variable).negated().shifted(domain.max())
+        : View.of(variable).shifted(Math.max(0, -domain.min()));
+  }
+
+  private <T> T pick(List<T> choices) {
+    return choices.get(random.nextInt(choices.size()));
+  }
+
+  private int between(int low, int high) {
+    return low + random.nextInt(high - low + 1);
+  }
+
+  private static <T> List<T> some(int size, Supplier<T> one) {
+    List<T> list = new ArrayList<>();
+    for (int i = 0; i < size; i++) {
+      list.add(one.get());
+    }
+    return list;
+  }
+}
