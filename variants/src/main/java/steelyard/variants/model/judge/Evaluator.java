@@ -71,22 +71,47 @@ public final class Evaluator {
     if (!violations.isEmpty()) {
       return new Judgement(Ints.of(values), violations, OptionalLong.empty());
     }
+    FormulaJudge judge = complete(values);
+    for (Posting posting : model.postings()) {
+      if (posting.duty() == Posting.Duty.ASSERTED && !judge.holds(posting.source())) {
+        violations.add(new Violation(Optional.of(posting), mentioned(posting, variables, values)));
+      }
+    }
+    OptionalLong objective = objective(values);
+    return new Judgement(Ints.of(values), violations, objective);
+  }
+
+  /**
+   * The objective of an assignment, exactly, whether or not it is a solution.
+   *
+   * @param decisions values in the order of {@code model.variables().decisions()}
+   * @return empty without an objective or with a value outside its domain
+   */
+  public OptionalLong objectiveOf(int[] decisions) {
+    int[] values = spread(decisions);
+    if (model.objective().isEmpty() || !outsideDomain(values).isEmpty()) {
+      return OptionalLong.empty();
+    }
+    complete(values);
+    return objective(values);
+  }
+
+  private OptionalLong objective(int[] values) {
+    return model
+        .objective()
+        .map(objective -> OptionalLong.of(objective.sum().value(v -> values[v])))
+        .orElse(OptionalLong.empty());
+  }
+
+  /** Gives every defined variable its value. */
+  private FormulaJudge complete(int[] values) {
     FormulaJudge judge = new FormulaJudge(v -> values[v]);
     for (Posting posting : model.postings()) {
       if (posting.duty() == Posting.Duty.DEFINITION) {
         complete(posting, judge, values);
       }
     }
-    for (Posting posting : model.postings()) {
-      if (posting.duty() == Posting.Duty.ASSERTED && !judge.holds(posting.source())) {
-        violations.add(new Violation(Optional.of(posting), mentioned(posting, variables, values)));
-      }
-    }
-    OptionalLong objective =
-        model.objective().isPresent()
-            ? OptionalLong.of(model.objective().get().sum().value(v -> values[v]))
-            : OptionalLong.empty();
-    return new Judgement(Ints.of(values), violations, objective);
+    return judge;
   }
 
   /**
