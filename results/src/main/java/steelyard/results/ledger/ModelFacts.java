@@ -33,6 +33,7 @@ public record ModelFacts(
               .formatted(variables, postings));
     }
     groups = Sorted.copy("groups", groups);
+    groups.keySet().forEach(name -> Text.requireName("group name", name));
   }
 
   /**

@@ -24,10 +24,11 @@ public record Recipe(
 
   public Recipe {
     Text.requireName("family", family);
-    Text.require("alias", alias);
+    Text.require("alias", alias).ifPresent(name -> Text.requireName("alias", name));
     Text.require("familyCode", familyCode);
     Text.require("instance", instance);
     amendments = List.copyOf(Text.require("amendments", amendments));
+    amendments.forEach(name -> Text.requireName("amendment", name));
     Text.requireName("variant", variant);
   }
 

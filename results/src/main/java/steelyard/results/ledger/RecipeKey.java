@@ -16,5 +16,6 @@ public record RecipeKey(String family, Digest familyCode, Digest content, List<S
     Text.require("familyCode", familyCode);
     Text.require("content", content);
     amendments = List.copyOf(Text.require("amendments", amendments));
+    amendments.forEach(name -> Text.requireName("amendment", name));
   }
 }

@@ -8,6 +8,7 @@ import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.StreamReadFeature;
 import com.fasterxml.jackson.core.json.JsonWriteFeature;
+import com.fasterxml.jackson.core.type.TypeReference;
 import com.fasterxml.jackson.core.util.DefaultIndenter;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
 import com.fasterxml.jackson.databind.DeserializationContext;
@@ -26,6 +27,8 @@ import java.io.StringWriter;
 import java.io.UncheckedIOException;
 import java.time.DateTimeException;
 import java.time.Instant;
+import java.util.List;
+import java.util.SortedMap;
 import java.util.stream.Collectors;
 
 /**
@@ -101,6 +104,29 @@ final class RecordJson {
     } catch (JsonProcessingException e) {
       requireForm(formOf(json), where);
       throw new LedgerProblem("%s: not a run's record: %s".formatted(where, explain(e)), REMEDY, e);
+    }
+  }
+
+  /** Any part of a record as one line of JSON: equal parts give equal text. */
+  static String text(Object part) {
+    return write(MAPPER.writer(), part);
+  }
+
+  /** What {@link #text} made of a list of strings. */
+  static List<String> strings(String text) {
+    return read(text, new TypeReference<>() {});
+  }
+
+  /** What {@link #text} made of a map of strings. */
+  static SortedMap<String, String> pairs(String text) {
+    return read(text, new TypeReference<>() {});
+  }
+
+  private static <T> T read(String text, TypeReference<T> type) {
+    try {
+      return MAPPER.readValue(text, type);
+    } catch (JsonProcessingException e) {
+      throw new IllegalArgumentException("not what this class wrote: " + text, e);
     }
   }
 

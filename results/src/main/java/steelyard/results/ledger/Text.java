@@ -18,11 +18,26 @@ final class Text {
     return value;
   }
 
-  /** Requires a text with something in it. */
+  /** Requires a name that can be stored, shown on a line and told from every other. */
   static void requireName(String what, String value) {
     if (require(what, value).isBlank()) {
       throw new IllegalArgumentException(what + " must not be empty");
     }
+    if (value.codePoints().anyMatch(Text::unprintable)) {
+      throw new IllegalArgumentException(
+          "%s must be printable on one line, was '%s'".formatted(what, head(value, 80)));
+    }
+  }
+
+  private static boolean unprintable(int codePoint) {
+    return switch (Character.getType(codePoint)) {
+      case Character.CONTROL,
+          Character.SURROGATE, // half of a pair, which no encoding can write
+          Character.LINE_SEPARATOR,
+          Character.PARAGRAPH_SEPARATOR ->
+          true;
+      default -> false;
+    };
   }
 
   /** Requires an id that is also a safe folder name on every file system. */

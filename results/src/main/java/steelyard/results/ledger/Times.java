@@ -1,5 +1,6 @@
 package steelyard.results.ledger;
 
+import java.util.Map;
 import java.util.OptionalLong;
 import java.util.SortedMap;
 
@@ -63,5 +64,30 @@ public record Times(SortedMap<Phase, Span> phases, long overshootNanos) {
   public long wallNanos(Phase phase) {
     Span span = phases.get(phase);
     return span == null ? 0 : span.wallNanos();
+  }
+
+  /** Wall nanoseconds under the limit's clock: lower, solve and answer. */
+  public long limitedNanos() {
+    long sum = 0;
+    for (Map.Entry<Phase, Span> entry : phases.entrySet()) {
+      if (entry.getKey().limited()) {
+        sum = Math.addExact(sum, entry.getValue().wallNanos());
+      }
+    }
+    return sum;
+  }
+
+  /** Processor nanoseconds of the same phases; empty if one of them was not measured. */
+  public OptionalLong limitedCpuNanos() {
+    long sum = 0;
+    for (Map.Entry<Phase, Span> entry : phases.entrySet()) {
+      if (entry.getKey().limited()) {
+        if (entry.getValue().cpuNanos().isEmpty()) {
+          return OptionalLong.empty();
+        }
+        sum = Math.addExact(sum, entry.getValue().cpuNanos().getAsLong());
+      }
+    }
+    return OptionalLong.of(sum);
   }
 }

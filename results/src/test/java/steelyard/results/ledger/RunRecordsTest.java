@@ -159,17 +159,18 @@ class RunRecordsTest {
     }
     String nasty = "\u0000\t\"\\\u2028 \ud83d\udd25 lone \ud83d";
     TreeMap<String, ModelFacts.Group> groups = new TreeMap<>();
-    groups.put(nasty, new ModelFacts.Group(Sample.digest("g"), 0));
+    String odd = "\"\\ \ud83d\udd25 ü";
+    groups.put(odd, new ModelFacts.Group(Sample.digest("g"), 0));
     return new RunRecord(
         "0".repeat(64),
         new RunKey(Long.MIN_VALUE, -1),
         Integer.MAX_VALUE,
-        Optional.of(new Place("swee", nasty, Integer.MAX_VALUE, Integer.MAX_VALUE)),
+        Optional.of(new Place("swee", odd, Integer.MAX_VALUE, Integer.MAX_VALUE)),
         new Recipe(
             "firing",
             Optional.of("old"),
             Digest.of(new byte[16]),
-            new Recipe.Instance(nasty, "", Digest.of(new byte[64]), "-", Double.MIN_VALUE),
+            new Recipe.Instance(odd, "", Digest.of(new byte[64]), "-", Double.MIN_VALUE),
             List.of(),
             "plain"),
         Optional.of(

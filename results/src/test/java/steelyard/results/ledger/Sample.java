@@ -32,11 +32,12 @@ final class Sample {
   private RunKey key = key("a");
   private int attempt;
   private Optional<Place> place = Optional.of(new Place("sweep-1", "nightly", 0, 0));
+  private String code = "firing code";
   private String instance = "week-07";
   private Digest content = digest("week-07");
   private List<String> amendments = List.of("load-bound");
   private Optional<String> alias = Optional.empty();
-  private Optional<ModelFacts> model = Optional.of(model("week-07", "load-bound"));
+  private Optional<ModelFacts> model = Optional.of(model(content.hex(), "load-bound"));
   private BackendBuild backend = new BackendBuild("cpsat", "cpsat", "9.15", digest("cpsat"));
   private String setting = "default";
   private long seed;
@@ -92,6 +93,13 @@ final class Sample {
   Sample amendments(String... names) {
     amendments = List.of(names);
     return rebuilt();
+  }
+
+  /** Another version of the family's code, which builds another plain model. */
+  Sample code(String version) {
+    code = version;
+    model = Optional.of(model(content.hex() + version, String.join("+", amendments)));
+    return this;
   }
 
   Sample alias(String value) {
@@ -164,7 +172,7 @@ final class Sample {
     return new Recipe(
         "firing",
         alias,
-        digest("firing code"),
+        digest(code),
         new Recipe.Instance(instance, "data/" + instance + ".txt", content, "winter", 2.5),
         amendments,
         alias.map(a -> variant + "@" + a).orElse(variant));

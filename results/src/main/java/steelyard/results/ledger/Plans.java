@@ -1,0 +1,213 @@
+package steelyard.results.ledger;
+
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.time.Instant;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
+import org.jdbi.v3.core.Handle;
+
+/** What is to be run: sweeps and their blocks. */
+public final class Plans {
+
+  private static final String SUMMARIES =
+      """
+      SELECT s.name, s.title, p.planned,
+        (SELECT count(*) FROM block b JOIN cell c ON c.block = b.id WHERE b.sweep = s.id),
+        count(r.id), max(r.finished), coalesce(p.planned, min(r.finished)) AS began
+      FROM sweep s
+        LEFT JOIN sweep_plan p ON p.sweep = s.id
+        LEFT JOIN block b ON b.sweep = s.id
+        LEFT JOIN run r ON r.block = b.id AND r.ending <> %d
+      GROUP BY s.id
+      ORDER BY began, s.id"""
+          .formatted(Codes.ENDING.of(Ending.STOPPED));
+
+  private final Store store;
+
+  Plans(Store store) {
+    this.store = store;
+  }
+
+  /** Adds a sweep; one that is there stays as it is. */
+  public void addSweep(Sweep sweep) {
+    store.write(
+        handle -> {
+          Rows rows = new Rows(handle);
+          rows.run(
+              """
+              INSERT INTO sweep_plan (sweep, planned, plan, in_service, file)
+              VALUES (?, ?, ?, ?, ?) ON CONFLICT (sweep) DO NOTHING""",
+              new Ids(rows).sweep(sweep.id(), sweep.name()),
+              sweep.planned().toEpochMilli(),
+              sweep.plan().bytes(),
+              sweep.inService().orElse(null),
+              sweep.file());
+          return null;
+        });
+  }
+
+  /**
+   * Adds blocks to a sweep, all or none; blocks that are there stay as they are.
+   *
+   * @throws LedgerProblem if the sweep is unknown, or a place in it is planned otherwise already
+   */
+  public void addBlocks(String sweep, List<Block> blocks) {
+    store.write(
+        handle -> {
+          Rows rows = new Rows(handle);
+          long id = idOf(rows, sweep);
+          blocks.forEach(block -> addBlock(rows, id, block));
+          return null;
+        });
+  }
+
+  /** Every sweep, the oldest first. */
+  public List<SweepSummary> sweeps() {
+    return store.read(handle -> handle.select(SUMMARIES).map((row, c) -> summary(row)).list());
+  }
+
+  /** The plan of a sweep; empty if it is unknown or only its runs are known. */
+  public Optional<Sweep> find(String sweep) {
+    return store.read(handle -> plans(handle, "s.name = ?", sweep).stream().findFirst());
+  }
+
+  /** The plan of the newest sweep of a name. */
+  public Optional<Sweep> latest(String name) {
+    return store.read(handle -> plans(handle, "s.title = ?", name).stream().findFirst());
+  }
+
+  /** The blocks of a sweep by number, their cells by position; empty for an unknown sweep. */
+  public List<Block> blocks(String sweep) {
+    Map<Integer, Long> seeds = new TreeMap<>();
+    Map<Integer, List<Cell>> cells = new TreeMap<>();
+    store.scan(
+        """
+        SELECT b.number, b.seed, c.position, c.key, n.family, n.alias, n.variant, n.backend,
+          n.setting, f.digest AS family_code, i.name AS instance, b.path, i.content, b.class,
+          b.weight, r.amendments, k.adapter, k.version, k.digest AS code, o.options
+        FROM sweep s JOIN block b ON b.sweep = s.id JOIN cell c ON c.block = b.id
+          JOIN candidate n ON n.id = c.candidate JOIN recipe r ON r.id = c.recipe
+          JOIN family_code f ON f.id = r.family_code JOIN instance i ON i.id = b.instance
+          JOIN backend_build k ON k.id = c.backend_build JOIN settings o ON o.id = c.settings
+        WHERE s.name = ? ORDER BY b.number, c.position""",
+        row -> {
+          seeds.put(row.getInt("number"), row.getLong("seed"));
+          cells.computeIfAbsent(row.getInt("number"), n -> new ArrayList<>()).add(cell(row));
+        },
+        sweep);
+    return cells.entrySet().stream()
+        .map(e -> new Block(e.getKey(), seeds.get(e.getKey()), e.getValue()))
+        .toList();
+  }
+
+  private static void addBlock(Rows rows, long sweep, Block block) {
+    Ids ids = new Ids(rows);
+    long id = ids.block(sweep, block.number(), block.seed(), block.cells().get(0).recipe());
+    for (Cell cell : block.cells()) {
+      addCell(rows, ids, sweep, id, cell);
+      boolean asPlanned =
+          rows.find(
+                  "SELECT 1 FROM cell WHERE block = ? AND position = ? AND key = ?",
+                  id,
+                  cell.position(),
+                  cell.key().bytes())
+              .isPresent();
+      if (!asPlanned) {
+        throw new LedgerProblem(
+            "block %d, position %d: the sweep has another run planned there"
+                .formatted(block.number(), cell.position()),
+            "plan it as a new sweep");
+      }
+    }
+  }
+
+  /** Adds a cell unless its place is taken. */
+  static void addCell(Rows rows, Ids ids, long sweep, long block, Cell cell) {
+    rows.run(
+        """
+        INSERT INTO cell (block, position, candidate, recipe, backend_build, settings, key)
+        VALUES (?, ?, ?, ?, ?, ?, ?) ON CONFLICT (block, position) DO NOTHING""",
+        block,
+        cell.position(),
+        ids.candidate(sweep, cell.recipe(), cell.backend(), cell.setting()),
+        ids.recipe(cell.recipe().key()),
+        ids.backendBuild(cell.backend()),
+        ids.settings(cell.setting()),
+        cell.key().bytes());
+  }
+
+  private static long idOf(Rows rows, String sweep) {
+    return rows.find("SELECT id FROM sweep WHERE name = ?", sweep)
+        .orElseThrow(
+            () ->
+                new LedgerProblem(
+                    "sweep '%s' is not in the ledger".formatted(sweep), "add it first"));
+  }
+
+  private static List<Sweep> plans(Handle handle, String condition, String value) {
+    return handle
+        .select(
+            """
+            SELECT s.name, s.title, p.planned, p.plan, p.in_service, p.file
+            FROM sweep s JOIN sweep_plan p ON p.sweep = s.id
+            WHERE %s ORDER BY p.planned DESC, s.id DESC"""
+                .formatted(condition),
+            value)
+        .map(
+            (row, context) ->
+                new Sweep(
+                    row.getString(1),
+                    row.getString(2),
+                    Instant.ofEpochMilli(row.getLong(3)),
+                    Digest.of(row.getBytes(4)),
+                    Optional.ofNullable(row.getString(5)),
+                    row.getString(6)))
+        .list();
+  }
+
+  private static SweepSummary summary(ResultSet row) throws SQLException {
+    return new SweepSummary(
+        row.getString(1),
+        row.getString(2),
+        instant(row, 3),
+        row.getLong(4),
+        row.getLong(5),
+        instant(row, 6));
+  }
+
+  private static Optional<Instant> instant(ResultSet row, int column) throws SQLException {
+    long millis = row.getLong(column);
+    return row.wasNull() ? Optional.empty() : Optional.of(Instant.ofEpochMilli(millis));
+  }
+
+  private static Cell cell(ResultSet row) throws SQLException {
+    String alias = row.getString("alias");
+    Recipe recipe =
+        new Recipe(
+            row.getString("family"),
+            alias.isEmpty() ? Optional.empty() : Optional.of(alias),
+            Digest.of(row.getBytes("family_code")),
+            new Recipe.Instance(
+                row.getString("instance"),
+                row.getString("path"),
+                Digest.of(row.getBytes("content")),
+                row.getString("class"),
+                row.getDouble("weight")),
+            RecordJson.strings(row.getString("amendments")),
+            row.getString("variant"));
+    return new Cell(
+        row.getInt("position"),
+        recipe,
+        new BackendBuild(
+            row.getString("backend"),
+            row.getString("adapter"),
+            row.getString("version"),
+            Digest.of(row.getBytes("code"))),
+        new Setting(row.getString("setting"), RecordJson.pairs(row.getString("options"))),
+        RunKey.of(row.getBytes("key")));
+  }
+}
