@@ -1,0 +1,31 @@
+package steelyard.harness.sweep;
+
+import java.util.HashSet;
+import java.util.List;
+import java.util.Objects;
+
+/**
+ * Runs that belong together for a fair comparison: candidates on one instance and seed, one after
+ * the other.
+ *
+ * @param number its place in the plan, from 0
+ * @param contest whose candidates they are
+ * @param instance what they run on
+ * @param seed the seed of all runs
+ * @param order the candidates in the order in which they run, each once, the one in service among
+ *     them
+ */
+public record Block(
+    int number, Contest contest, Instance instance, long seed, List<Candidate> order) {
+
+  public Block {
+    Objects.requireNonNull(instance, "instance");
+    order = List.copyOf(order);
+    if (number < 0 || seed < 0) {
+      throw new IllegalArgumentException("number or seed below 0: " + number + ", " + seed);
+    }
+    if (!order.contains(contest.inService()) || new HashSet<>(order).size() < order.size()) {
+      throw new IllegalArgumentException("a block needs the one in service, and each once");
+    }
+  }
+}

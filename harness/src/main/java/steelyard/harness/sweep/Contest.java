@@ -1,0 +1,63 @@
+package steelyard.harness.sweep;
+
+import java.util.HashSet;
+import java.util.List;
+import java.util.Objects;
+import java.util.Optional;
+import steelyard.results.ledger.Digest;
+import steelyard.results.ledger.Recipe;
+
+/**
+ * One family's part of a sweep: who is compared on what.
+ *
+ * @param family the family's name
+ * @param code digest of the family's code
+ * @param candidates each once, in the order of the sweep file; at least one
+ * @param inService the candidate that the others are held against; one of them
+ * @param pairs what is to be shown before against after
+ * @param instances at least one, by unique names
+ * @param leftOut how many combinations of amendments were left out because they cannot be combined
+ */
+public record Contest(
+    String family,
+    Digest code,
+    List<Candidate> candidates,
+    Candidate inService,
+    List<Pair> pairs,
+    List<Instance> instances,
+    int leftOut) {
+
+  public Contest {
+    Objects.requireNonNull(family, "family");
+    Objects.requireNonNull(code, "code");
+    candidates = List.copyOf(candidates);
+    pairs = List.copyOf(pairs);
+    instances = List.copyOf(instances);
+    if (!candidates.contains(inService)) {
+      throw new IllegalArgumentException(inService + " is in service and not a candidate");
+    }
+    if (new HashSet<>(candidates).size() < candidates.size()) {
+      throw new IllegalArgumentException("a candidate comes twice: " + candidates);
+    }
+    for (Pair pair : pairs) {
+      if (!candidates.contains(pair.before()) || !candidates.contains(pair.after())) {
+        throw new IllegalArgumentException("no candidates: " + pair);
+      }
+    }
+    if (instances.isEmpty()
+        || instances.stream().map(Instance::name).distinct().count() < instances.size()) {
+      throw new IllegalArgumentException("instances must be some, with names of their own");
+    }
+  }
+
+  /** How a candidate's model on an instance is made. */
+  public Recipe recipe(Candidate candidate, Instance instance) {
+    return new Recipe(
+        family,
+        Optional.empty(),
+        code,
+        instance.forRecipe(),
+        candidate.amendments(),
+        candidate.variant());
+  }
+}
