@@ -69,6 +69,9 @@ public record TimeRatio(double value, Kind kind) {
     if (pairs.isEmpty() || (below && above)) {
       return Optional.empty();
     }
+    if (pairs.size() == 1) {
+      return Optional.of(pairs.get(0)); // as it is, not by way of its logarithm
+    }
     double logs = 0;
     for (TimeRatio pair : pairs) {
       logs += StrictMath.log(pair.value);
