@@ -18,7 +18,12 @@ public final class Fresh {
   }
 
   public static Fresh beside(Variables variables) {
-    return new Fresh(IntStream.range(0, variables.size()).mapToObj(variables::domain).toList());
+    return beside(IntStream.range(0, variables.size()).mapToObj(variables::domain).toList());
+  }
+
+  /** Beside variables of the given domains, by id: a backend may have narrowed the model's. */
+  public static Fresh beside(List<Domain> domains) {
+    return new Fresh(domains);
   }
 
   /** The domain of a variable, of the model's or new. */

@@ -1,0 +1,137 @@
+package steelyard.adapters.sat;
+
+import java.util.Optional;
+import java.util.OptionalLong;
+import steelyard.adapters.sat.SatSolver.Answer;
+import steelyard.adapters.sat.encoding.Integers;
+import steelyard.adapters.sat.encoding.ModelEncoder;
+import steelyard.adapters.sat.encoding.ObjectiveBound;
+import steelyard.adapters.spi.Deadline;
+import steelyard.adapters.spi.Goal;
+import steelyard.adapters.spi.Monitor;
+import steelyard.adapters.spi.SolveOutcome;
+import steelyard.adapters.spi.SolveOutcome.Why;
+import steelyard.adapters.spi.Status;
+import steelyard.variants.model.Ints;
+import steelyard.variants.model.Model;
+
+/** Answers one goal by one solver call after another, each with more clauses. */
+final class Search {
+  private final Model model;
+  private final Integers integers;
+  private final Optional<ObjectiveBound> objective;
+  private final SatSolver solver;
+  private final Deadline deadline;
+  private final Monitor monitor;
+
+  Search(Model model, ModelEncoder encoded, SatSolver solver, Deadline deadline, Monitor monitor) {
+    this.model = model;
+    this.integers = encoded.integers();
+    this.objective = encoded.objective();
+    this.solver = solver;
+    this.deadline = deadline;
+    this.monitor = monitor;
+  }
+
+  SolveOutcome run(Goal goal) {
+    if (goal instanceof Goal.Enumerate all) {
+      return enumerate(all.projection(), all.atMost());
+    }
+    return goal instanceof Goal.Optimise && objective.isPresent()
+        ? optimise(objective.get())
+        : satisfy();
+  }
+
+  private SolveOutcome satisfy() {
+    Answer answer = solver.search();
+    if (answer == Answer.YES) {
+      report();
+    }
+    return outcome(answer == Answer.YES, answer, OptionalLong.empty());
+  }
+
+  /** Asks for something better until there is nothing. */
+  private SolveOutcome optimise(ObjectiveBound bound) {
+    monitor.bound(bound.atBest());
+    OptionalLong best = OptionalLong.empty();
+    Answer answer = solver.search();
+    while (answer == Answer.YES) {
+      report();
+      best = OptionalLong.of(model.objective().orElseThrow().sum().value(this::value));
+      bound.requireBetterThan(best.getAsLong());
+      answer = solver.search();
+    }
+    if (answer == Answer.NO && best.isPresent()) {
+      monitor.bound(best.getAsLong());
+      return SolveOutcome.of(Status.OPTIMAL, best, Why.EXHAUSTED);
+    }
+    return outcome(best.isPresent(), answer, OptionalLong.of(bound.atBest()));
+  }
+
+  /** Forbids each projected solution before asking for the next. */
+  private SolveOutcome enumerate(Ints projection, long atMost) {
+    for (int i = 0; i < projection.size(); i++) {
+      if (!integers.has(projection.get(i))) {
+        String name = model.variables().name(projection.get(i));
+        return new SolveOutcome(
+            Status.UNKNOWN,
+            OptionalLong.empty(),
+            Why.REFUSED,
+            "variable " + name + " is defined, but nothing uses it: sat does not lower it");
+      }
+    }
+    long found = 0;
+    Answer answer = Answer.YES;
+    while (found < atMost && answer == Answer.YES) {
+      answer = solver.search();
+      if (answer == Answer.YES) {
+        found++;
+        report();
+        forbid(projection);
+      }
+    }
+    return outcome(found > 0, answer, OptionalLong.empty());
+  }
+
+  private void forbid(Ints projection) {
+    int[] differs = new int[2 * projection.size()];
+    int size = 0;
+    for (int i = 0; i < projection.size(); i++) {
+      int variable = projection.get(i);
+      int position = integers.position(variable, solver.truth());
+      if (position > 0) {
+        differs[size++] = -integers.order(variable, position);
+      }
+      if (position + 1 < integers.size(variable)) {
+        differs[size++] = integers.order(variable, position + 1);
+      }
+    }
+    solver.clause(differs, size);
+  }
+
+  private int value(int variable) {
+    return integers.valueAt(variable, integers.position(variable, solver.truth()));
+  }
+
+  private void report() {
+    monitor.solution(model.variables().decisions().stream().map(this::value).toArray());
+  }
+
+  private SolveOutcome outcome(boolean found, Answer last, OptionalLong bound) {
+    Status status =
+        found ? Status.FEASIBLE : last == Answer.NO ? Status.INFEASIBLE : Status.UNKNOWN;
+    Why why =
+        switch (last) {
+          case YES, NO -> Why.EXHAUSTED;
+          case OUT_OF_WORK -> Why.WORK;
+          case STOPPED -> stopped(deadline);
+        };
+    boolean isBound = last != Answer.NO;
+    return SolveOutcome.of(status, isBound ? bound : OptionalLong.empty(), why);
+  }
+
+  /** Why a run was stopped. */
+  static Why stopped(Deadline deadline) {
+    return deadline.nanosLeft() <= 0 ? Why.WALL : Why.STOPPED;
+  }
+}

@@ -1,0 +1,97 @@
+package steelyard.adapters.sat.encoding;
+
+import java.util.Optional;
+import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.BinPacking;
+import steelyard.variants.model.Clause;
+import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.Element;
+import steelyard.variants.model.Linear;
+import steelyard.variants.model.Maximum;
+import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.RelationVisitor;
+import steelyard.variants.model.Table;
+
+/**
+ * Writes a posted relation and answers with the encoding's name; empty, and nothing written, where
+ * the shared decomposition is better.
+ */
+final class RelationEncoder implements RelationVisitor<Optional<String>> {
+  /** How a clause is encoded. */
+  static final String ITSELF = "itself, over order literals";
+
+  private final Cnf cnf;
+  private final Integers integers;
+  private final LinearEncoder linear;
+
+  RelationEncoder(Cnf cnf, Integers integers, LinearEncoder linear) {
+    this.cnf = cnf;
+    this.integers = integers;
+    this.linear = linear;
+  }
+
+  /** Adds the clause's literals to the one being written. */
+  Cnf anyOf(Clause clause) {
+    for (int i = 0; i < clause.atoms().size(); i++) {
+      cnf.or(integers.literal(clause.atoms().get(i)));
+    }
+    return cnf;
+  }
+
+  @Override
+  public Optional<String> linear(Linear relation) {
+    linear.encode(relation, Cnf.TRUE);
+    return Optional.of(String.join("; ", linear.used()));
+  }
+
+  @Override
+  public Optional<String> clause(Clause relation) {
+    anyOf(relation).end();
+    return Optional.of(ITSELF);
+  }
+
+  @Override
+  public Optional<String> allDifferent(AllDifferent relation) {
+    new AllDifferentEncoder(cnf, integers).encode(relation);
+    return Optional.of(AllDifferentEncoder.NAME);
+  }
+
+  @Override
+  public Optional<String> element(Element relation) {
+    new ElementEncoder(cnf, integers, linear).encode(relation);
+    return Optional.of(ElementEncoder.NAME);
+  }
+
+  @Override
+  public Optional<String> table(Table relation) {
+    return Optional.of(new TableEncoder(cnf, integers).encode(relation));
+  }
+
+  @Override
+  public Optional<String> maximum(Maximum relation) {
+    new MaximumEncoder(cnf, integers, linear).encode(relation);
+    return Optional.of(MaximumEncoder.NAME);
+  }
+
+  @Override
+  public Optional<String> noOverlap(NoOverlap relation) {
+    new NoOverlapEncoder(cnf, integers, linear).encode(relation);
+    return Optional.of(NoOverlapEncoder.NAME);
+  }
+
+  @Override
+  public Optional<String> cumulative(Cumulative relation) {
+    CumulativeEncoder encoder = new CumulativeEncoder(cnf, integers, linear);
+    if (!encoder.suits(relation)) {
+      return Optional.empty();
+    }
+    encoder.encode(relation);
+    return Optional.of(CumulativeEncoder.NAME);
+  }
+
+  @Override
+  public Optional<String> binPacking(BinPacking relation) {
+    new BinPackingEncoder(cnf, integers, linear).encode(relation);
+    return Optional.of(BinPackingEncoder.NAME);
+  }
+}

@@ -1,0 +1,2 @@
+/** Models as clauses, solved by Sat4j in this process. */
+package steelyard.adapters.sat;
