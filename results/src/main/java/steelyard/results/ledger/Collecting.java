@@ -23,11 +23,13 @@ final class Collecting {
   private final Handle handle;
   private final Rows rows;
   private final Ids ids;
+  private final StoredRecords stored;
 
   Collecting(Handle handle) {
     this.handle = handle;
     this.rows = new Rows(handle);
     this.ids = new Ids(rows);
+    this.stored = new StoredRecords(handle);
   }
 
   /** What became of a record. */
@@ -42,20 +44,15 @@ final class Collecting {
 
   /** Adds a run unless its id is there. */
   Added add(RunRecord record) {
-    String json = RunRecords.toJson(record);
-    Optional<Long> known = rows.find("SELECT id FROM run WHERE name = ?", record.run());
-    if (known.isPresent()) {
-      boolean same = Runs.storedJson(handle, known.get(), record.run()).equals(json);
-      return same ? Added.KNOWN : Added.CLASH;
+    if (rows.find("SELECT 1 FROM run WHERE name = ?", record.run()).isPresent()) {
+      return stored.record(record.run()).equals(record) ? Added.KNOWN : Added.CLASH;
     }
-    addRun(record);
-    rows.run(
-        "INSERT INTO record (run, zlib) VALUES (last_insert_rowid(), ?)",
-        (Object) Packed.pack(json));
+    long session = ids.session(record.session());
+    stored.add(addRun(record, session), session, RunRecords.toJson(record));
     return Added.FRESH;
   }
 
-  private void addRun(RunRecord r) {
+  private long addRun(RunRecord r, long session) {
     Conditions c = r.conditions();
     Outcome o = r.outcome();
     Optional<Long> model = r.model().map(ids::model);
@@ -81,7 +78,7 @@ final class Collecting {
         .bind("goal", Codes.GOAL.of(c.goal().kind()))
         .bind("limits", ids.limits(c.limits()))
         .bind("mode", Codes.MODE.of(c.mode()))
-        .bind("session", ids.session(r.session()))
+        .bind("session", session)
         .bind("status", Codes.STATUS.of(o.status()))
         .bind("ending", Codes.ENDING.of(o.ending()))
         .bind("killed", o.killed().isPresent())
@@ -101,6 +98,7 @@ final class Collecting {
         .bind("disturbed", r.disturbed())
         .bind("finished", r.finished().toEpochMilli())
         .execute();
+    return rows.find("SELECT last_insert_rowid()").orElseThrow();
   }
 
   /** The plan's names come with the record too, so that records alone make a ledger. */

@@ -3,11 +3,8 @@ package steelyard.results.ledger;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.time.Instant;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
-import java.util.TreeMap;
 import org.jdbi.v3.core.Handle;
 
 /** What is to be run: sweeps and their blocks. */
@@ -82,26 +79,7 @@ public final class Plans {
 
   /** The blocks of a sweep by number, their cells by position; empty for an unknown sweep. */
   public List<Block> blocks(String sweep) {
-    Map<Integer, Long> seeds = new TreeMap<>();
-    Map<Integer, List<Cell>> cells = new TreeMap<>();
-    store.scan(
-        """
-        SELECT b.number, b.seed, c.position, c.key, n.family, n.alias, n.variant, n.backend,
-          n.setting, f.digest AS family_code, i.name AS instance, b.path, i.content, b.class,
-          b.weight, r.amendments, k.adapter, k.version, k.digest AS code, o.options
-        FROM sweep s JOIN block b ON b.sweep = s.id JOIN cell c ON c.block = b.id
-          JOIN candidate n ON n.id = c.candidate JOIN recipe r ON r.id = c.recipe
-          JOIN family_code f ON f.id = r.family_code JOIN instance i ON i.id = b.instance
-          JOIN backend_build k ON k.id = c.backend_build JOIN settings o ON o.id = c.settings
-        WHERE s.name = ? ORDER BY b.number, c.position""",
-        row -> {
-          seeds.put(row.getInt("number"), row.getLong("seed"));
-          cells.computeIfAbsent(row.getInt("number"), n -> new ArrayList<>()).add(cell(row));
-        },
-        sweep);
-    return cells.entrySet().stream()
-        .map(e -> new Block(e.getKey(), seeds.get(e.getKey()), e.getValue()))
-        .toList();
+    return PlannedBlocks.of(store, sweep);
   }
 
   private static void addBlock(Rows rows, long sweep, Block block) {
@@ -182,32 +160,5 @@ public final class Plans {
   private static Optional<Instant> instant(ResultSet row, int column) throws SQLException {
     long millis = row.getLong(column);
     return row.wasNull() ? Optional.empty() : Optional.of(Instant.ofEpochMilli(millis));
-  }
-
-  private static Cell cell(ResultSet row) throws SQLException {
-    String alias = row.getString("alias");
-    Recipe recipe =
-        new Recipe(
-            row.getString("family"),
-            alias.isEmpty() ? Optional.empty() : Optional.of(alias),
-            Digest.of(row.getBytes("family_code")),
-            new Recipe.Instance(
-                row.getString("instance"),
-                row.getString("path"),
-                Digest.of(row.getBytes("content")),
-                row.getString("class"),
-                row.getDouble("weight")),
-            RecordJson.strings(row.getString("amendments")),
-            row.getString("variant"));
-    return new Cell(
-        row.getInt("position"),
-        recipe,
-        new BackendBuild(
-            row.getString("backend"),
-            row.getString("adapter"),
-            row.getString("version"),
-            Digest.of(row.getBytes("code"))),
-        new Setting(row.getString("setting"), RecordJson.pairs(row.getString("options"))),
-        RunKey.of(row.getBytes("key")));
   }
 }

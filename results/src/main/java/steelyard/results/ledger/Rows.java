@@ -1,14 +1,23 @@
 package steelyard.results.ledger;
 
+import java.nio.ByteBuffer;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.jdbi.v3.core.Handle;
 
-/** The few statements that adding to the ledger is made of. */
+/**
+ * The few statements that adding to the ledger is made of. For one transaction: what it has found
+ * once it does not look for again.
+ */
 final class Rows {
 
   private final Handle handle;
+  private final Map<List<Object>, Long> known = new HashMap<>();
 
   Rows(Handle handle) {
     this.handle = handle;
@@ -42,9 +51,23 @@ final class Rows {
       columns[i] = (String) columnsAndValues[2 * i];
       values[i] = columnsAndValues[2 * i + 1];
     }
+    return known.computeIfAbsent(identity(table, values), absent -> id(table, columns, values));
+  }
+
+  private long id(String table, String[] columns, Object[] values) {
     String equal = String.join(" = ? AND ", columns) + " = ?";
     return find("SELECT id FROM " + table + " WHERE " + equal, values)
         .orElseGet(() -> add(insert(table, columns), values));
+  }
+
+  /** Table and values, with bytes compared by content. */
+  private static List<Object> identity(String table, Object[] values) {
+    List<Object> identity = new ArrayList<>(values.length + 1);
+    identity.add(table);
+    for (Object value : values) {
+      identity.add(value instanceof byte[] bytes ? ByteBuffer.wrap(bytes) : value);
+    }
+    return identity;
   }
 
   private static String insert(String table, String... columns) {

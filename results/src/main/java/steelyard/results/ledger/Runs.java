@@ -1,8 +1,6 @@
 package steelyard.results.ledger;
 
-import java.io.IOException;
 import java.util.List;
-import org.jdbi.v3.core.Handle;
 
 /** What ran: records come in, and come out again as they were. */
 public final class Runs {
@@ -88,19 +86,7 @@ public final class Runs {
    */
   public RunRecord record(String beginning) {
     String run = resolve(beginning);
-    String json = store.read(handle -> storedJson(handle, idOf(new Rows(handle), run), run));
-    return RunRecords.fromJson(json, store.file() + ", run " + run);
-  }
-
-  static String storedJson(Handle handle, long id, String run) {
-    byte[] packed =
-        handle.select("SELECT zlib FROM record WHERE run = ?", id).mapTo(byte[].class).one();
-    try {
-      return Packed.unpack(packed);
-    } catch (IOException e) {
-      throw new LedgerProblem(
-          "run %s: its record is damaged".formatted(run), "put back a copy of the ledger", e);
-    }
+    return store.read(handle -> new StoredRecords(handle).record(run));
   }
 
   static long idOf(Rows rows, String run) {

@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -50,6 +52,26 @@ class RunsTest {
 
     assertThat(runs.record("3fa2c9d1")).isEqualTo(built);
     assertThat(runs.record("77b0")).isEqualTo(unbuilt);
+  }
+
+  @Test
+  void gives_the_whole_record_back_whatever_session_it_is_of() {
+    Session later =
+        new Session(
+            "session-2",
+            "0.1.0",
+            "kiln-house",
+            Sample.NIGHT.machine(),
+            Sample.NIGHT.launch(),
+            Sample.MIDNIGHT.plusSeconds(86_400));
+    List<RunRecord> records = new ArrayList<>();
+    for (int i = 0; i < 6; i++) {
+      records.add(
+          Sample.run("run-" + i).seed(i).session(i % 2 == 0 ? Sample.NIGHT : later).record());
+    }
+    records.forEach(runs::collect);
+
+    assertThat(records).allSatisfy(r -> assertThat(runs.record(r.run())).isEqualTo(r));
   }
 
   @Test

@@ -229,10 +229,17 @@ CREATE INDEX run_key ON run (key);
 CREATE INDEX run_block ON run (block, key) WHERE block IS NOT NULL;
 CREATE INDEX run_problem ON run (problem) WHERE problem IS NOT NULL;
 
--- The whole record, apart from the narrow rows that are scanned.
+-- The whole record, apart from the narrow rows that are scanned. Records of one session resemble
+-- each other: the first is the dictionary by which the others are compressed.
 CREATE TABLE record (
   run INTEGER PRIMARY KEY REFERENCES run,
-  zlib BLOB NOT NULL -- JSON, compressed (RFC 1950)
+  basis INTEGER REFERENCES record (run), -- null: compressed by itself
+  zlib BLOB NOT NULL -- JSON in the ZLIB format (RFC 1950); the dictionary is the basis's JSON
+) STRICT;
+
+CREATE TABLE session_basis (
+  session INTEGER PRIMARY KEY REFERENCES session,
+  run INTEGER NOT NULL REFERENCES record (run)
 ) STRICT;
 
 -- A cell that takes a run which was made elsewhere under the same key.
