@@ -40,13 +40,17 @@ public final class LiveTable {
 
   /** Notes a child before it is started, so that there is no moment in which it could be lost. */
   Entry enter(String run, String tag, long earliestTicks) throws IOException {
-    Files.createDirectories(folder);
     long pid = ProcessHandle.current().pid();
     ProcessId owner = new ProcessId(pid, proc.stat(pid).map(ProcStat::startTicks).orElse(0L));
     LiveNote note =
         new LiveNote(
             run, tag, proc.hostName(), proc.bootId(), owner, Optional.empty(), earliestTicks);
-    note.write(folder);
+    try {
+      Files.createDirectories(folder);
+      note.write(folder);
+    } catch (IOException e) {
+      throw new IOException("cannot note run " + run + " in " + folder + ": " + e.getMessage(), e);
+    }
     return new Entry(note);
   }
 

@@ -76,16 +76,29 @@ final class ProcFs {
   /** Bytes resident now, and the most that ever were since the program was loaded. */
   record Memory(long residentBytes, long peakBytes) {}
 
-  /** The value of a variable in the environment that a process was started with. */
-  Optional<String> environment(long pid, String name) {
-    String marker = name + "=";
-    String all = read(file(pid, "environ")).orElse("");
-    int from = all.startsWith(marker) ? 0 : all.indexOf("\0" + marker) + 1;
-    if (from == 0 && !all.startsWith(marker)) {
+  /**
+   * The environment that a program was started with, as in the file; empty if it cannot be read.
+   */
+  String environment(long pid) {
+    return read(file(pid, "environ")).orElse("");
+  }
+
+  /** The words that a program was started with, as in the file; empty if they cannot be read. */
+  String commandLine(long pid) {
+    return read(file(pid, "cmdline")).orElse("");
+  }
+
+  /** The value of a variable in an environment. */
+  static Optional<String> variable(String environment, String name) {
+    String marker = "\0" + name + "=";
+    String marked = "\0" + environment;
+    int at = marked.indexOf(marker);
+    if (at < 0) {
       return Optional.empty();
     }
-    int end = all.indexOf('\0', from);
-    return Optional.of(all.substring(from + marker.length(), end < 0 ? all.length() : end));
+    int from = at + marker.length();
+    int end = marked.indexOf('\0', from);
+    return Optional.of(marked.substring(from, end < 0 ? marked.length() : end));
   }
 
   /** Clock ticks since boot, time asleep included. */

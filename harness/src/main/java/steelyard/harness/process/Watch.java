@@ -63,6 +63,9 @@ public final class Watch {
       endNanos = System.nanoTime();
       ended = child.end();
     }
+    if (reason.isEmpty() && stop.position() == Position.KILL) {
+      kill(Reason.STOPPED); // somebody ended it between two looks
+    }
     awaitCode();
     if (ended.found() > 0) {
       endNanos = System.nanoTime();

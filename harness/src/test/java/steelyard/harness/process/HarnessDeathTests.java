@@ -80,9 +80,22 @@ class HarnessDeathTests {
 
     assertThat(Eventually.holds(() -> !harness.isAlive())).isTrue();
     assertThat(harness.exitValue()).isEqualTo(SIGTERM_CODE);
-    assertThat(listener.folder.resolve("result")).hasContent("Optional[STOPPED] Optional[STOPPED]");
+    assertThat(listener.folder.resolve("result")).content().matches("STOPPED \\w+ STOPPED \\w+");
     assertThat(listener.survivors()).isEmpty();
     assertThat(deaf.survivors()).isEmpty();
+  }
+
+  @Test
+  void calls_runs_disturbed_whenTheHarnessWasSuspended() throws IOException {
+    startHarness(1);
+    send("STOP");
+    long from = System.nanoTime();
+    assertThat(Eventually.holds(() -> System.nanoTime() - from > 700_000_000)).isTrue();
+    send("CONT");
+    send("TERM");
+
+    assertThat(Eventually.holds(() -> !harness.isAlive())).isTrue();
+    assertThat(listener.folder.resolve("result")).hasContent("STOPPED disturbed STOPPED disturbed");
   }
 
   @Test

@@ -35,10 +35,15 @@ final class HarnessProgram {
               new Watch(listener, limits, PhaseSource.none(), stop)::await);
       Files.createFile(folder.resolve("ready"));
       Exit second = new Watch(deaf, limits, PhaseSource.none(), stop).await();
-      Files.writeString(folder.resolve("result"), first.join().reason() + " " + second.reason());
+      Files.writeString(folder.resolve("result"), summary(first.join()) + " " + summary(second));
       status = signals.exitStatus();
     }
     System.exit(status.orElse(0));
+  }
+
+  private static String summary(Exit exit) {
+    String reason = exit.reason().map(Exit.Reason::name).orElse("none");
+    return reason + (exit.usage().disturbed() ? " disturbed" : " undisturbed");
   }
 
   private static ProcessLimits limits(Duration grace) {

@@ -48,12 +48,12 @@ class ProcFsTests {
   void reads_environment_byWholeNames() throws IOException {
     Files.createDirectories(root.resolve("7"));
     Files.writeString(root.resolve("7").resolve("environ"), "XTILE=1\0TILE=blue=2\0A=TILE=3\0");
-    ProcFs proc = new ProcFs(root);
+    String environment = new ProcFs(root).environment(7);
 
-    assertThat(proc.environment(7, "TILE")).hasValue("blue=2");
-    assertThat(proc.environment(7, "XTILE")).hasValue("1");
-    assertThat(proc.environment(7, "ILE")).isEmpty();
-    assertThat(proc.environment(8, "TILE")).isEmpty();
+    assertThat(ProcFs.variable(environment, "TILE")).hasValue("blue=2");
+    assertThat(ProcFs.variable(environment, "XTILE")).hasValue("1");
+    assertThat(ProcFs.variable(environment, "ILE")).isEmpty();
+    assertThat(new ProcFs(root).environment(8)).isEmpty();
   }
 
   @Test

@@ -3,7 +3,7 @@ package steelyard.harness.process;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
-import static org.assertj.core.api.Assumptions.assumeThat;
+import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import java.io.IOException;
 import java.nio.file.Files;
@@ -13,6 +13,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.concurrent.CompletableFuture;
 import java.util.stream.Stream;
+import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -31,6 +32,11 @@ class WatchTests {
   @BeforeEach
   void makeTrial() {
     trial = new Trial(temporary);
+  }
+
+  @AfterEach
+  void leaveNothing() {
+    trial.survivors().forEach(ProcessHandle::destroyForcibly);
   }
 
   /** With all tools of the system, and with none. */
@@ -170,11 +176,24 @@ class WatchTests {
     assertThat(trial.survivors()).isEmpty();
   }
 
+  @ParameterizedTest
+  @MethodSource("tools")
+  void ends_all_whenNewDaemonsAreMadeWithoutEnd(Tools tools) throws IOException {
+    trial.tools = tools;
+    trial.wall = Duration.ofMillis(200);
+    trial.grace = Duration.ofMillis(10);
+    Exit exit = trial.shell("while :; do setsid sleep 1000 & sleep 0.01; done");
+
+    assertThat(exit.reason()).hasValue(Reason.WALL);
+    assertThat(exit.left()).isZero();
+    assertThat(trial.survivors()).isEmpty();
+  }
+
   @Test
   void kills_all_whenAChildOfTheChildTakesTooMuchMemory() throws IOException {
-    trial.memoryBytes = 100 * Trial.MEBIBYTE;
+    trial.memoryBytes = 40 * Trial.MEBIBYTE;
     // tail keeps its input until the end, which does not come
-    Exit exit = trial.shell("(head -c 300000000 /dev/zero; sleep 1000) | tail -c 300000000");
+    Exit exit = trial.shell("(head -c 100000000 /dev/zero; sleep 1000) | tail -c 100000000");
 
     assertThat(exit.reason()).hasValue(Reason.MEMORY);
     assertThat(exit.killed()).isTrue();
@@ -315,7 +334,7 @@ class WatchTests {
 
   @Test
   void pins_child_toItsCores() throws IOException {
-    assumeThat(Tools.detect().taskset()).isPresent();
+    assumeTrue(Tools.detect().taskset().isPresent());
     int core = CpuTopology.here().allowed().get(0);
     Launch launch =
         Launch.of(
