@@ -54,7 +54,7 @@ public record CacheFolder(Path root, Optional<String> warning) {
   }
 
   /** A subfolder, made if need be. */
-  Path folder(String name) throws IOException {
+  public Path folder(String name) throws IOException {
     return Files.createDirectories(root.resolve(name));
   }
 

@@ -10,7 +10,7 @@ import java.util.concurrent.TimeUnit;
 /** A child that was started, and what can be asked of it. */
 public final class RunningProcess {
   /** Written to the lifeline to ask the child to end. */
-  static final String STOP_REQUEST = "stop\n";
+  static final String STOP_REQUEST = "stop";
 
   /** After a kill only the kernel can hold a process, and not for this long. */
   private static final long END_WITHIN_NANOS = TimeUnit.SECONDS.toNanos(5);
@@ -53,8 +53,13 @@ public final class RunningProcess {
 
   /** Asks the child to end. Nothing happens if it has ended or does not read. */
   public void askToStop() {
+    tell(STOP_REQUEST);
+  }
+
+  /** Writes a line to the child's lifeline. Nothing happens if it has ended or does not read. */
+  public void tell(String line) {
     try {
-      process.getOutputStream().write(STOP_REQUEST.getBytes(StandardCharsets.US_ASCII));
+      process.getOutputStream().write((line + "\n").getBytes(StandardCharsets.UTF_8));
       process.getOutputStream().flush();
     } catch (IOException e) {
       return; // the child has closed its end: there is nobody left to ask
@@ -79,6 +84,15 @@ public final class RunningProcess {
       launcher.forget(this);
     }
     return ended;
+  }
+
+  public boolean isAlive() {
+    return process.isAlive();
+  }
+
+  /** Ends a child that serves and is not watched. */
+  public void endNow() {
+    end();
   }
 
   /** The exit code, or 128 + the signal, as soon as the first process has been waited for. */

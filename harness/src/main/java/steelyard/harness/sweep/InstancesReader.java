@@ -227,7 +227,7 @@ final class InstancesReader {
     }
   }
 
-  private static Digest sha256(Path file) throws IOException {
+  static Digest sha256(Path file) throws IOException {
     try {
       MessageDigest sha = MessageDigest.getInstance("SHA-256");
       try (InputStream in = new DigestInputStream(Files.newInputStream(file), sha)) {

@@ -13,8 +13,13 @@ import steelyard.variants.model.Longs;
 /** Something that a worker says, in a line of its {@code events.jsonl}. */
 public sealed interface Event {
 
-  /** One of {@link Phases} begins. */
-  record Phase(String name) implements Event {}
+  /**
+   * One of {@link Phases} begins.
+   *
+   * @param cpuNanos processor time of the process so far, in steps of the kernel's clock; empty
+   *     where it cannot be read
+   */
+  record Phase(String name, OptionalLong cpuNanos) implements Event {}
 
   /** Within a phase, a step of the backend's own begins, such as {@code presolve}. */
   record Step(String name) implements Event {}
@@ -97,8 +102,15 @@ public sealed interface Event {
     }
   }
 
-  /** A family that is there. */
-  record Family(String name, String summary, List<Amendment> amendments) implements Event {
+  /**
+   * A family that is there.
+   *
+   * @param place where its class was loaded from, a jar or a folder
+   * @param inside the package of its class
+   */
+  record Family(
+      String name, String summary, String place, String inside, List<Amendment> amendments)
+      implements Event {
     public Family {
       amendments = List.copyOf(amendments);
     }

@@ -40,6 +40,7 @@ final class EventCodec {
   private static void body(Event event, JsonGenerator json) throws IOException {
     if (event instanceof Event.Phase phase) {
       kind(json, "phase").writeStringField("name", phase.name());
+      optional(json, "cpu", phase.cpuNanos());
     } else if (event instanceof Event.Step step) {
       kind(json, "step").writeStringField("name", step.name());
     } else if (event instanceof Event.Solution solution) {
@@ -135,6 +136,8 @@ final class EventCodec {
   private static void family(Event.Family family, JsonGenerator json) throws IOException {
     kind(json, "family").writeStringField("name", family.name());
     json.writeStringField("summary", family.summary());
+    json.writeStringField("place", family.place());
+    json.writeStringField("inside", family.inside());
     json.writeArrayFieldStart("amendments");
     for (Event.Amendment amendment : family.amendments()) {
       json.writeStartObject();
@@ -195,7 +198,7 @@ final class EventCodec {
   private static Event event(Fields fields) throws IOException {
     String kind = fields.text("e");
     return switch (kind) {
-      case "phase" -> new Event.Phase(fields.text("name"));
+      case "phase" -> new Event.Phase(fields.text("name"), optional(fields, "cpu"));
       case "step" -> new Event.Step(fields.text("name"));
       case "solution" ->
           new Event.Solution(optional(fields, "objective"), fields.ints("decisions"));
@@ -265,7 +268,12 @@ final class EventCodec {
               each.texts("requires"),
               each.texts("excludes")));
     }
-    return new Event.Family(fields.text("name"), fields.text("summary"), amendments);
+    return new Event.Family(
+        fields.text("name"),
+        fields.text("summary"),
+        fields.text("place"),
+        fields.text("inside"),
+        amendments);
   }
 
   private static Event readBackend(Fields fields) throws IOException {

@@ -47,6 +47,11 @@ final class EventWriter implements AutoCloseable {
     }
   }
 
+  /** Says that a phase begins. */
+  void phase(String name) {
+    write(new Event.Phase(name, OwnCpu.nanos()));
+  }
+
   private void append(StampedEvent stamped) {
     try {
       StampedEvent next = new StampedEvent(number, stamped.nanos(), stamped.event());

@@ -15,5 +15,8 @@ public final class Phases {
   /** Those of the limit's clock. */
   public static final List<String> LIMITED = List.of(LOWER, SOLVE, ANSWER);
 
+  /** All of them. */
+  public static final List<String> ALL = List.of(LOAD, BUILD, SHUFFLE, LOWER, SOLVE, ANSWER, DONE);
+
   private Phases() {}
 }

@@ -45,12 +45,12 @@ final class Run {
     Prepared prepared = prepare();
     try (RunDeadline deadline = begin();
         Lowering lowering = lower(prepared, deadline)) {
-      events.write(new Event.Phase(Phases.SOLVE));
+      events.phase(Phases.SOLVE);
       Monitor monitor = prepared.seeding().monitor(new Telling(prepared.model()));
       Goal goal = prepared.seeding().goal(goal(prepared.model()));
       SolveOutcome outcome = guarded(() -> lowering.solve(goal, monitor));
       events.flush();
-      events.write(new Event.Phase(Phases.ANSWER));
+      events.phase(Phases.ANSWER);
       events.write(new Event.Result(outcome));
       if (outcome.ended() == SolveOutcome.Why.REFUSED) {
         throw new WorkerException(Event.Failure.Kind.UNSUPPORTED, outcome.reason());
@@ -89,15 +89,15 @@ final class Run {
   private record Prepared(Backend backend, Settings settings, Model model, Seeding seeding) {}
 
   private Prepared prepare() {
-    events.write(new Event.Phase(Phases.LOAD));
+    events.phase(Phases.LOAD);
     Backend backend = Registry.backend(order.backend());
     Settings settings = settings(backend.describe());
     Subject.OfVariant subject = (Subject.OfVariant) order.subject();
     Built<?> built = Built.read(subject);
-    events.write(new Event.Phase(Phases.BUILD));
+    events.phase(Phases.BUILD);
     Model model = built.model(subject.amendments());
     events.write(new Event.Built(Built.facts(model, 0)));
-    events.write(new Event.Phase(Phases.SHUFFLE));
+    events.phase(Phases.SHUFFLE);
     return new Prepared(backend, settings, model, Seeding.of(model, order.seed()));
   }
 
@@ -119,7 +119,7 @@ final class Run {
   }
 
   private RunDeadline begin() {
-    events.write(new Event.Phase(Phases.LOWER));
+    events.phase(Phases.LOWER);
     return new RunDeadline(order.wallSeconds(), order.work(), lifeline);
   }
 

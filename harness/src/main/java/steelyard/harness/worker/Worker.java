@@ -1,6 +1,7 @@
 package steelyard.harness.worker;
 
 import java.io.IOException;
+import java.net.URISyntaxException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.TreeMap;
@@ -19,6 +20,7 @@ import steelyard.variants.family.Family;
  *   <li>{@code judge}: judges the run in each folder that is named on standard input
  *   <li>{@code describe}: says which families and backends there are
  *   <li>{@code calibrate}: times the calibration task
+ *   <li>{@code train}: loads what runs need, for an archive of classes
  * </ul>
  */
 public final class Worker {
@@ -27,6 +29,8 @@ public final class Worker {
 
   /** The task came to nothing; the last event says why. */
   public static final int FAILED = 2;
+
+  private static final String TRAIN = "train";
 
   private Worker() {}
 
@@ -46,7 +50,10 @@ public final class Worker {
         }
       }
       events.flush();
-      events.write(new Event.Phase(Phases.DONE));
+      events.phase(Phases.DONE);
+    }
+    if (args.length > 0 && args[0].equals(TRAIN)) {
+      return; // a halt would write no archive
     }
     // Foreign code may have left threads that are no daemons.
     Runtime.getRuntime().halt(code);
@@ -63,6 +70,7 @@ public final class Worker {
       case "digest" -> digest(Path.of(args.get(1)), events);
       case "judge" -> judge(lifeline);
       case "describe" -> describe(events);
+      case TRAIN -> describe(events);
       case "calibrate" -> events.write(new Event.Calibrated(Calibration.nanos()));
       default ->
           throw new WorkerException(
@@ -115,10 +123,21 @@ public final class Worker {
   }
 
   private static <I> Event.Family described(Family<I> family) {
+    Class<?> type = family.getClass();
     return new Event.Family(
         family.name(),
         family.summary(),
+        place(type),
+        type.getPackageName(),
         family.amendments().stream().map(Worker::described).toList());
+  }
+
+  private static String place(Class<?> type) {
+    try {
+      return Path.of(type.getProtectionDomain().getCodeSource().getLocation().toURI()).toString();
+    } catch (URISyntaxException e) {
+      throw new IllegalStateException("a class was loaded from no file: " + type, e);
+    }
   }
 
   private static Event.Amendment described(Amendment<?> amendment) {

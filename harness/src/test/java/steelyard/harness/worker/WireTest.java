@@ -36,7 +36,8 @@ class WireTest {
 
   static List<Event> events() {
     return List.of(
-        new Event.Phase(Phases.SOLVE),
+        new Event.Phase(Phases.SOLVE, OptionalLong.of(30_000_000)),
+        new Event.Phase(Phases.DONE, OptionalLong.empty()),
         new Event.Step(NASTY),
         new Event.Solution(OptionalLong.empty(), Ints.of()),
         new Event.Solution(
@@ -69,6 +70,8 @@ class WireTest {
         new Event.Family(
             "workshop",
             NASTY,
+            "/a b/c.jar",
+            "steelyard.x",
             List.of(new Event.Amendment("a", "implied", "", List.of("b"), List.of()))),
         new Event.Backend(
             new Description(

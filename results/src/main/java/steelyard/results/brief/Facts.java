@@ -68,7 +68,13 @@ public record Facts(
 
   /** How many runs' solutions were judged, and how many claims stand on what. */
   public record Trust(
-      int valid, int invalid, int unchecked, int proved, int agreed, int alone, int contradicted) {}
+      int valid, int invalid, int unchecked, int proved, int agreed, int alone, int contradicted) {
+
+    /** Whether no solution was refused and no claim is contradicted. */
+    public boolean isSound() {
+      return invalid == 0 && contradicted == 0;
+    }
+  }
 
   /**
    * Something wrong or weak.

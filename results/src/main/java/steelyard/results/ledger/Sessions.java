@@ -34,6 +34,26 @@ public final class Sessions {
                 .findOne());
   }
 
+  /** The sessions in which runs of a sweep were made, in order. */
+  public List<Session> of(String sweep) {
+    return store.read(
+        handle ->
+            handle
+                .select(
+                    """
+                    SELECT s.name, s.harness, m.class, m.facts, s.launch, s.started
+                    FROM session s JOIN machine m ON m.id = s.machine
+                    WHERE s.id IN (
+                      SELECT r.session FROM run r
+                      JOIN block b ON b.id = r.block
+                      JOIN sweep w ON w.id = b.sweep
+                      WHERE w.name = ?)
+                    ORDER BY s.id""",
+                    sweep)
+                .map((row, context) -> session(row))
+                .list());
+  }
+
   /**
    * Adds what a calibration in a session gave.
    *

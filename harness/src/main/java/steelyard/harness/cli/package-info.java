@@ -1,0 +1,2 @@
+/** Commands: what a person types, what they read. */
+package steelyard.harness.cli;

@@ -1,0 +1,2 @@
+/** Carries blocks out on this machine. */
+package steelyard.harness.local;

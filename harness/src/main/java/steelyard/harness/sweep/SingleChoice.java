@@ -1,0 +1,216 @@
+package steelyard.harness.sweep;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collection;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalLong;
+import java.util.SortedMap;
+import java.util.TreeMap;
+import java.util.function.Function;
+import steelyard.adapters.spi.Setting;
+import steelyard.harness.sweep.text.Mistakes;
+import steelyard.harness.sweep.text.Phrases;
+import steelyard.harness.sweep.text.Place;
+import steelyard.harness.sweep.text.SweepProblem;
+import steelyard.results.ledger.BackendBuild;
+import steelyard.results.ledger.Limits;
+import steelyard.results.ledger.Observation;
+
+/** One candidate on one instance, as chosen on a command line. Mistakes are told as in a file. */
+public final class SingleChoice {
+  private SingleChoice() {}
+
+  /**
+   * The family of that name.
+   *
+   * @throws SweepProblem if there is none
+   */
+  public static Catalogue.Family family(Catalogue catalogue, String name) {
+    return catalogue
+        .family(name)
+        .orElseThrow(
+            () ->
+                unknown(
+                    "family",
+                    name,
+                    catalogue.families().stream().map(Catalogue.Family::name).toList()));
+  }
+
+  /**
+   * An instance by its name among those that the family ships, or by its file.
+   *
+   * @throws SweepProblem if it is neither
+   */
+  public static Instance instance(Catalogue.Family family, String text) {
+    Mistakes mistakes = new Mistakes();
+    List<ListedInstance> shipped =
+        family
+            .instances()
+            .map(folder -> InstanceFolder.read(folder, folder.toString(), mistakes))
+            .orElse(List.of());
+    Optional<ListedInstance> named =
+        shipped.stream().filter(each -> each.name().equals(text)).findFirst();
+    if (named.isPresent()) {
+      return read(named.get());
+    }
+    Path file = Path.of(text);
+    if (Files.isRegularFile(file)) {
+      Path absolute = file.toAbsolutePath();
+      return read(
+          new ListedInstance(
+              file.getFileName().toString(),
+              absolute,
+              Place.of(text),
+              Instance.NONE,
+              Instance.NONE,
+              1,
+              Optional.empty(),
+              OptionalLong.empty()));
+    }
+    List<String> names = shipped.stream().map(ListedInstance::name).toList();
+    throw new SweepProblem(
+        List.of(
+            Phrases.unknown("instance", text, names) + ", and no file of that name",
+            "  " + Phrases.known(names)));
+  }
+
+  /** The instances that a family ships, a line each: name, class, set, best known objective. */
+  public static List<String> listed(Catalogue.Family family) {
+    return family
+        .instances()
+        .map(folder -> InstanceFolder.read(folder, folder.toString(), new Mistakes()))
+        .orElse(List.of())
+        .stream()
+        .map(
+            it ->
+                "%s  %s  %s  %s"
+                    .formatted(
+                        it.name(),
+                        it.instanceClass(),
+                        it.set(),
+                        it.known().isPresent() ? "best known " + it.known().getAsLong() : ""))
+        .map(String::stripTrailing)
+        .toList();
+  }
+
+  private static Instance read(ListedInstance listed) {
+    try {
+      return new Instance(
+          listed.name(),
+          listed.path(),
+          InstancesReader.sha256(listed.path()),
+          Files.size(listed.path()),
+          listed.set(),
+          listed.instanceClass(),
+          listed.weight(),
+          listed.date(),
+          listed.known());
+    } catch (IOException e) {
+      throw new SweepProblem(List.of("cannot read the instance file " + listed.path()));
+    }
+  }
+
+  /**
+   * The amendments of a variant such as {@code plain+a+b}, in order of declaration.
+   *
+   * @throws SweepProblem if one is unknown or they cannot be combined
+   */
+  public static List<String> amendments(Catalogue.Family family, String variant) {
+    List<String> parts = new ArrayList<>(Arrays.asList(variant.split("\\+", -1)));
+    if (!parts.remove(0).equals(Candidate.PLAIN)) {
+      throw new SweepProblem(
+          List.of(
+              "a variant begins with 'plain', as in plain+"
+                  + family.names().stream().findFirst().orElse("amendment")
+                  + ", not "
+                  + Phrases.quoted(variant)));
+    }
+    for (String part : parts) {
+      if (!family.names().contains(part)) {
+        throw unknown("amendment", part, family.names());
+      }
+    }
+    Optional<String> conflict = family.conflict(parts);
+    if (conflict.isPresent()) {
+      throw new SweepProblem(List.of("variant " + Phrases.quoted(variant) + ": " + conflict.get()));
+    }
+    return family.inOrder(parts);
+  }
+
+  /**
+   * A backend with options over its defaults.
+   *
+   * @throws SweepProblem if the backend or an option is unknown, or a value out of its range
+   */
+  public static Setup setup(
+      Catalogue catalogue, String name, Map<String, String> given, int threads, Limits limits) {
+    Catalogue.Backend backend = backend(catalogue, name);
+    requireKnown(backend, given.keySet());
+    SortedMap<String, String> options = new TreeMap<>();
+    for (Setting option : backend.settings()) {
+      String text = given.getOrDefault(option.name(), option.defaultText());
+      String mistake = option.mistakeIn(text);
+      if (!mistake.isEmpty()) {
+        throw new SweepProblem(List.of("option " + option.name() + " of " + name + ": " + mistake));
+      }
+      options.put(option.name(), text);
+    }
+    limits
+        .work()
+        .filter(work -> !backend.workUnits().contains(work.unit()))
+        .ifPresent(
+            work -> {
+              throw unknown("unit of work", work.unit(), backend.workUnits());
+            });
+    return new Setup(
+        new BackendBuild(name, backend.name(), backend.version(), backend.code()),
+        new steelyard.results.ledger.Setting(
+            given.isEmpty() ? Observation.DEFAULT_SETTING : "chosen", options),
+        threads,
+        limits);
+  }
+
+  /**
+   * The backend of that name that can run.
+   *
+   * @throws SweepProblem if there is none; says why where it is known
+   */
+  public static Catalogue.Backend backend(Catalogue catalogue, String name) {
+    Function<String, SweepProblem> cannot =
+        reason -> new SweepProblem(List.of("backend " + name + " cannot run here: " + reason));
+    return catalogue
+        .backend(name)
+        .orElseThrow(
+            () ->
+                catalogue
+                    .whyMissing(name)
+                    .map(cannot)
+                    .orElseGet(
+                        () ->
+                            unknown(
+                                "backend",
+                                name,
+                                catalogue.backends().stream()
+                                    .map(Catalogue.Backend::name)
+                                    .toList())));
+  }
+
+  private static void requireKnown(Catalogue.Backend backend, Collection<String> given) {
+    for (String option : given) {
+      if (!backend.options().contains(option)) {
+        throw unknown("option", option, backend.options());
+      }
+    }
+  }
+
+  private static SweepProblem unknown(String kind, String found, Collection<String> known) {
+    return new SweepProblem(
+        List.of(Phrases.unknown(kind, found, known), "  " + Phrases.known(known)));
+  }
+}

@@ -1,0 +1,71 @@
+# Sourced by the other scripts: finds a JDK 17 or newer and Maven, installs what is missing where it
+# may, and otherwise says the one command to run.
+
+root=$(CDPATH='' cd -- "$(dirname -- "$0")/.." && pwd -P)
+me=$(basename -- "$0")
+
+java_major() {
+  "$1" -version 2>&1 | sed -n 's/.*version "\([0-9]*\).*/\1/p' | head -n 1
+}
+
+has_jdk() {
+  if [ -n "${JAVA_HOME:-}" ] && [ -x "$JAVA_HOME/bin/javac" ]; then
+    [ "$(java_major "$JAVA_HOME/bin/java")" -ge 17 ] 2>/dev/null
+  else
+    command -v javac >/dev/null 2>&1 && [ "$(java_major java)" -ge 17 ] 2>/dev/null
+  fi
+}
+
+# Charts draw text: Java without a screen still needs a font.
+has_fonts() {
+  command -v fc-list >/dev/null 2>&1 && [ -n "$(fc-list 2>/dev/null | head -n 1)" ]
+}
+
+ensure_toolchain() {
+  missing=
+  has_jdk || missing="$missing openjdk-17-jdk-headless"
+  command -v mvn >/dev/null 2>&1 || missing="$missing maven"
+  has_fonts || missing="$missing fontconfig fonts-dejavu-core"
+  [ -n "$missing" ] || return 0
+  if ! command -v apt-get >/dev/null 2>&1; then
+    echo "$me: install a JDK 17 or newer, Maven and a font, then run this again" >&2
+    exit 2
+  fi
+  if [ "$(id -u)" -eq 0 ]; then
+    as_root=env
+  elif command -v sudo >/dev/null 2>&1 && sudo -n true 2>/dev/null; then
+    as_root="sudo -n env"
+  else
+    echo "$me: not allowed to install packages; run this, then try again:" >&2
+    echo "  sudo apt-get update && sudo apt-get install -y --no-install-recommends$missing" >&2
+    exit 2
+  fi
+  echo "installing$missing" >&2
+  # shellcheck disable=SC2086 # package names are words of their own
+  $as_root apt-get -qq update >&2 &&
+    $as_root DEBIAN_FRONTEND=noninteractive apt-get -qq -y install --no-install-recommends \
+      $missing >/dev/null || {
+    echo "$me: could not install$missing" >&2
+    exit 2
+  }
+}
+
+# Builds the installation unless no source is newer than it.
+ensure_built() {
+  home=$root/harness/target/steelyard
+  mark=$home/.built
+  if [ -e "$mark" ] && [ -z "$(find "$root" \( -name target -o -name .git \) -prune -o \
+      \( -path '*/src/main/*' -o -name pom.xml \) -type f -newer "$mark" -print -quit)" ]; then
+    return 0
+  fi
+  ensure_toolchain
+  echo "building" >&2
+  log=$root/target/build.log
+  mkdir -p "$root/target"
+  if ! (cd "$root" && mvn -B -q -DskipTests package) >"$log" 2>&1; then
+    tail -n 40 "$log" >&2
+    echo "$me: the build failed; the whole log: $log" >&2
+    exit 1
+  fi
+  touch "$mark"
+}
