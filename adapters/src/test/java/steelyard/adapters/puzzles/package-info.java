@@ -1,0 +1,2 @@
+/** Puzzles whose answers are published: fixtures for whoever answers models. */
+package steelyard.adapters.puzzles;
