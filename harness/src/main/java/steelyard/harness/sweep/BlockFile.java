@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.function.Function;
 import steelyard.harness.sweep.text.SweepProblem;
 import steelyard.harness.sweep.text.Utf8;
 import steelyard.results.ledger.Goal;
@@ -61,12 +62,6 @@ public record BlockFile(
     }
   }
 
-  /** Says what is known only once a model is built. */
-  public interface Keys {
-    /** The key of a candidate's run in a block, if it is known. */
-    Optional<RunKey> key(Block block, Candidate candidate);
-  }
-
   public BlockFile {
     Objects.requireNonNull(sweep, "sweep");
     Objects.requireNonNull(sweepName, "sweepName");
@@ -90,8 +85,14 @@ public record BlockFile(
    * @param sweep the sweep's id
    * @param sweepName the sweep's name
    * @param into the folder that takes a folder for each run, absolute
+   * @param keys what is known of each candidate's key in this block
    */
-  public static BlockFile of(Block block, String sweep, String sweepName, Path into, Keys keys) {
+  public static BlockFile of(
+      Block block,
+      String sweep,
+      String sweepName,
+      Path into,
+      Function<Candidate, Optional<RunKey>> keys) {
     List<Run> runs = new ArrayList<>();
     for (Candidate candidate : block.order()) {
       runs.add(
@@ -101,7 +102,7 @@ public record BlockFile(
               new Recipe.OfVariant(block.contest().recipe(candidate, block.instance())),
               candidate.setup(),
               Goal.optimise(),
-              keys.key(block, candidate)));
+              keys.apply(candidate)));
     }
     return new BlockFile(FORM, sweep, sweepName, block.number(), block.seed(), into, runs);
   }

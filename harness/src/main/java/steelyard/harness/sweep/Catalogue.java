@@ -5,11 +5,13 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
 import java.util.SortedSet;
 import java.util.TreeSet;
+import steelyard.adapters.spi.Description;
 import steelyard.adapters.spi.Setting;
 import steelyard.harness.sweep.text.SweepProblem;
 import steelyard.results.ledger.Digest;
@@ -161,6 +163,27 @@ public record Catalogue(List<Family> families, List<Backend> backends, List<Miss
       if (!(heapShare > 0 && heapShare <= 1)) {
         throw new IllegalArgumentException("heap share must be in (0, 1], was " + heapShare);
       }
+    }
+
+    /**
+     * What a backend says of itself.
+     *
+     * @param code digest of the adapter's code, its libraries, natives or program
+     */
+    public static Backend of(Description description, Digest code) {
+      return new Backend(
+          description.name(),
+          description.version(),
+          code,
+          description.followsBranching(),
+          description.portable(),
+          description.goals().stream()
+              .map(goal -> goal.getSimpleName().toLowerCase(Locale.ROOT))
+              .sorted()
+              .toList(),
+          description.workUnits(),
+          description.settings(),
+          description.heapShare());
     }
 
     /** The options' names. */

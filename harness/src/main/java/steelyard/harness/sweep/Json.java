@@ -13,6 +13,7 @@ import com.fasterxml.jackson.databind.DeserializationFeature;
 import com.fasterxml.jackson.databind.JsonMappingException;
 import com.fasterxml.jackson.databind.MapperFeature;
 import com.fasterxml.jackson.databind.deser.std.StdScalarDeserializer;
+import com.fasterxml.jackson.databind.exc.UnrecognizedPropertyException;
 import com.fasterxml.jackson.databind.json.JsonMapper;
 import com.fasterxml.jackson.databind.module.SimpleModule;
 import com.fasterxml.jackson.databind.ser.std.ToStringSerializer;
@@ -74,7 +75,12 @@ final class Json {
         throw Mistakes.only(Place.of(shown), "holds nothing");
       }
       return value;
+    } catch (UnrecognizedPropertyException e) {
+      throw Mistakes.only(Place.of(shown), path(e) + "not known here");
     } catch (JsonProcessingException e) {
+      if (e.getOriginalMessage().startsWith("Missing creator property")) {
+        throw Mistakes.only(Place.of(shown), path(e) + "missing");
+      }
       throw Mistakes.only(place(e, shown), path(e) + reason(e));
     }
   }

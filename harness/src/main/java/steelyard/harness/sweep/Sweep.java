@@ -7,6 +7,7 @@ import steelyard.results.statistics.TieMargin;
 /**
  * A sweep as its file describes it, with every name resolved and every default filled in.
  *
+ * @param file the text of the file
  * @param name the sweep's name
  * @param notes the person's own words; may be empty
  * @param contests one for each family; at least one
@@ -18,6 +19,7 @@ import steelyard.results.statistics.TieMargin;
  * @param remarks what the file left open and how it was taken, and what to be aware of; a line each
  */
 public record Sweep(
+    String file,
     String name,
     String notes,
     List<Contest> contests,
@@ -29,6 +31,7 @@ public record Sweep(
     List<String> remarks) {
 
   public Sweep {
+    Objects.requireNonNull(file, "file");
     Objects.requireNonNull(name, "name");
     Objects.requireNonNull(notes, "notes");
     Objects.requireNonNull(tieMargin, "tieMargin");

@@ -67,7 +67,9 @@ public final class SweepFile {
   public static Sweep read(Path file, Catalogue catalogue) {
     String shown = file.toString();
     Mistakes mistakes = new Mistakes();
-    Field root = Field.ofYaml(shown, Utf8.read(file, shown, LARGEST), mistakes);
-    return new SweepReader(catalogue, file.toAbsolutePath().getParent(), mistakes).read(root);
+    String text = Utf8.read(file, shown, LARGEST);
+    Field root = Field.ofYaml(shown, text, mistakes);
+    Path folder = file.toAbsolutePath().getParent();
+    return new SweepReader(catalogue, folder, text, mistakes).read(root);
   }
 }

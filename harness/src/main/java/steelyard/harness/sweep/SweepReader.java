@@ -42,12 +42,20 @@ final class SweepReader {
 
   private final Catalogue catalogue;
   private final Path base;
+  private final String text;
   private final Mistakes mistakes;
   private final List<String> remarks = new ArrayList<>();
 
-  SweepReader(Catalogue catalogue, Path base, Mistakes mistakes) {
+  /**
+   * A reader.
+   *
+   * @param base the folder that relative paths start from
+   * @param text the text of the file
+   */
+  SweepReader(Catalogue catalogue, Path base, String text, Mistakes mistakes) {
     this.catalogue = catalogue;
     this.base = base;
+    this.text = text;
     this.mistakes = mistakes;
   }
 
@@ -77,7 +85,16 @@ final class SweepReader {
     remarkOnThreads(setups, seeds);
     mistakes.throwIfAny();
     return new Sweep(
-        name.orElseThrow(), notes, contests, seeds, margin, penalty, cores, blockSize, remarks);
+        text,
+        name.orElseThrow(),
+        notes,
+        contests,
+        seeds,
+        margin,
+        penalty,
+        cores,
+        blockSize,
+        remarks);
   }
 
   private List<Setup> setups(Field field, Allowances allowances) {

@@ -167,6 +167,15 @@ final class Samples {
       numbers.add(seed);
     }
     return new Sweep(
-        name, "", contests, numbers, new TieMargin(0.05, 0.05), 2, 1, blockSize, List.of());
+        "name: " + name,
+        name,
+        "",
+        contests,
+        numbers,
+        new TieMargin(0.05, 0.05),
+        2,
+        1,
+        blockSize,
+        List.of());
   }
 }
