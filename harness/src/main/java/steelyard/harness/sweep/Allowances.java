@@ -1,5 +1,6 @@
 package steelyard.harness.sweep;
 
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
@@ -39,6 +40,7 @@ final class Allowances {
   private final Optional<Field> work;
   private final Map<String, Field> workByName;
   private final Set<String> workUsed = new HashSet<>();
+  private final Map<String, Optional<Limits.Work>> amounts = new HashMap<>();
 
   private Allowances(Optional<Keys> keys) {
     work = keys.flatMap(k -> k.optional("work"));
@@ -69,7 +71,9 @@ final class Allowances {
 
   /** What a run on this backend is allowed; a missing amount of work is a mistake. */
   Limits of(String name, Catalogue.Backend backend) {
-    return new Limits(wallSeconds, work.flatMap(w -> amount(w, name, backend)), memoryBytes);
+    Optional<Limits.Work> amount =
+        amounts.computeIfAbsent(name, n -> work.flatMap(w -> amount(w, n, backend)));
+    return new Limits(wallSeconds, amount, memoryBytes);
   }
 
   private Optional<Limits.Work> amount(Field all, String name, Catalogue.Backend backend) {

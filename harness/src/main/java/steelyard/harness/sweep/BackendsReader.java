@@ -1,6 +1,7 @@
 package steelyard.harness.sweep;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -25,6 +26,7 @@ final class BackendsReader {
   private static final List<String> KEYS =
       List.of("name", "backend", "options", "threads", "settings");
   private static final String THREADS = "threads";
+  private static final Set<String> CHANGES = Set.of("options", THREADS);
 
   private final Catalogue catalogue;
   private final Allowances allowances;
@@ -53,13 +55,13 @@ final class BackendsReader {
     entry
         .text()
         .flatMap(name -> backend(entry, name))
-        .ifPresent(backend -> addDefault(entry, backend.name(), backend));
-  }
-
-  private void addDefault(Field place, String name, Catalogue.Backend backend) {
-    if (isNew(place, name)) {
-      add(name, backend, Observation.DEFAULT_SETTING, new Chosen(Map.of(), allowances.threads()));
-    }
+        .filter(backend -> isNew(entry, backend.name()))
+        .ifPresent(
+            backend ->
+                add(
+                    new Entry(backend.name(), backend, unchanged()),
+                    Observation.DEFAULT_SETTING,
+                    unchanged()));
   }
 
   private void readEntry(Field entry) {
@@ -80,64 +82,52 @@ final class BackendsReader {
   }
 
   private void readSettings(Field place, Keys keys, String name, Catalogue.Backend backend) {
-    Chosen common = common(keys, backend);
-    boolean renamed = !name.equals(backend.name());
-    if (renamed && isKnown(name)) {
+    Entry entry = new Entry(name, backend, common(keys, backend));
+    if (entry.isRenamed() && isKnown(name)) {
       place.mistake(
           Phrases.quoted(name) + " is the name of another backend; choose one of its own");
-      return;
+    } else if (isNew(place, name)) {
+      Optional<Field> settings = keys.optional("settings");
+      if (settings.isPresent()) {
+        settings.get().entries().forEach((key, field) -> readSetting(entry, key, field));
+      } else if (!entry.isRenamed() && !Collections.disjoint(keys.present(), CHANGES)) {
+        place.mistake(
+            "options and threads need a name of their own",
+            "for example: {name: " + name + "-2, backend: " + name + ", options: ...}",
+            "or several under settings: {" + name + "-a: {...}, ...}");
+      } else {
+        add(entry, Observation.DEFAULT_SETTING, entry.common());
+      }
     }
-    if (!isNew(place, name)) {
-      return;
-    }
-    Optional<Field> settings = keys.optional("settings");
-    if (settings.isPresent()) {
-      settings
-          .get()
-          .entries()
-          .forEach((setting, field) -> readSetting(name, backend, setting, field, common, renamed));
-    } else if (!renamed && (keys.optional("options").isPresent() || hasThreads(keys))) {
-      place.mistake(
-          "options and threads need a name of their own",
-          "for example: {name: " + name + "-2, backend: " + name + ", options: ...}",
-          "or several under settings: {" + name + "-a: {...}, ...}");
-    } else {
-      add(name, backend, Observation.DEFAULT_SETTING, common);
-    }
-  }
-
-  private static boolean hasThreads(Keys keys) {
-    return keys.optional(THREADS).isPresent();
   }
 
   private Chosen common(Keys keys, Catalogue.Backend backend) {
     int threads = keys.optional(THREADS).map(this::threads).orElse(allowances.threads());
-    return keys.optional("options")
-        .map(field -> chosen(field, backend, new Chosen(Map.of(), threads)))
-        .orElse(new Chosen(Map.of(), threads));
+    Chosen plain = new Chosen(Map.of(), threads);
+    return keys.optional("options").map(field -> chosen(field, backend, plain)).orElse(plain);
   }
 
-  private void readSetting(
-      String name,
-      Catalogue.Backend backend,
-      String setting,
-      Field field,
-      Chosen common,
-      boolean renamed) {
-    Chosen chosen = chosen(field, backend, common);
-    if (!setting.matches("[A-Za-z0-9][A-Za-z0-9._-]{0,63}")) {
-      field.mistakeInKey(Phrases.quoted(setting) + " cannot be a name");
-    } else if (setting.equals(Observation.DEFAULT_SETTING) && !chosen.equals(common)) {
+  private void readSetting(Entry entry, String setting, Field field) {
+    Chosen chosen = chosen(field, entry.backend(), entry.common());
+    boolean isDefault = setting.equals(Observation.DEFAULT_SETTING);
+    if (isDefault && !chosen.equals(entry.common())) {
       field.mistake("the setting 'default' has no options of its own; give it another name");
-    } else if (setting.equals(Observation.DEFAULT_SETTING) && !renamed && !isPlain(common)) {
+    } else if (isDefault && !entry.isRenamed() && !chosen.equals(unchanged())) {
       field.mistake("'default' under the backend's own name has no options; name the entry");
-    } else {
-      add(name, backend, setting, chosen);
+    } else if (field.isNamed(setting)) {
+      add(entry, setting, chosen);
     }
   }
 
-  private boolean isPlain(Chosen chosen) {
-    return chosen.equals(new Chosen(Map.of(), allowances.threads()));
+  private Chosen unchanged() {
+    return new Chosen(Map.of(), allowances.threads());
+  }
+
+  /** An entry of the list: a backend under a name, and what all its settings share. */
+  private record Entry(String name, Catalogue.Backend backend, Chosen common) {
+    boolean isRenamed() {
+      return !name.equals(backend.name());
+    }
   }
 
   /** Options and threads as the file gives them. */
@@ -202,15 +192,16 @@ final class BackendsReader {
     return false;
   }
 
-  private void add(String name, Catalogue.Backend backend, String setting, Chosen chosen) {
+  private void add(Entry entry, String setting, Chosen chosen) {
+    Catalogue.Backend backend = entry.backend();
     SortedMap<String, String> options = new TreeMap<>();
     backend.settings().forEach(s -> options.put(s.name(), s.defaultText()));
     options.putAll(chosen.options());
     setups.add(
         new Setup(
-            new BackendBuild(name, backend.name(), backend.version(), backend.code()),
+            new BackendBuild(entry.name(), backend.name(), backend.version(), backend.code()),
             new steelyard.results.ledger.Setting(setting, options),
             chosen.threads(),
-            allowances.of(name, backend)));
+            allowances.of(entry.name(), backend)));
   }
 }

@@ -1,7 +1,6 @@
 package steelyard.harness.sweep;
 
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Objects;
 import java.util.function.Function;
@@ -28,8 +27,13 @@ public record Block(
     if (number < 0 || seed < 0) {
       throw new IllegalArgumentException("number or seed below 0: " + number + ", " + seed);
     }
-    if (!order.contains(contest.inService()) || new HashSet<>(order).size() < order.size()) {
-      throw new IllegalArgumentException("a block needs the one in service, and each once");
+    if (!order.contains(contest.inService())) {
+      throw new IllegalArgumentException("the one in service is not in block " + number);
+    }
+    for (int i = 1; i < order.size(); i++) {
+      if (order.subList(0, i).contains(order.get(i))) {
+        throw new IllegalArgumentException(order.get(i) + " comes twice in block " + number);
+      }
     }
   }
 

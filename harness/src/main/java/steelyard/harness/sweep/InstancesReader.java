@@ -118,7 +118,8 @@ final class InstancesReader {
           "give a folder, for example: instances: {folder: data}");
       return List.of();
     }
-    return list(place, family.instances().get(), family.instances().get().toString());
+    Path folder = family.instances().get().toAbsolutePath().normalize();
+    return list(place, folder, folder.toString());
   }
 
   private List<ListedInstance> folder(Field field) {

@@ -66,8 +66,8 @@ public record Plan(Sweep sweep, List<Block> blocks) {
     List<Block> blocks = new ArrayList<>();
     for (long seed : sweep.seeds()) {
       for (Turn turn : turns) {
-        for (List<Candidate> heat : turn.heats()) {
-          List<Candidate> order = shuffled(heat, sweep, turn, seed);
+        for (int heat = 0; heat < turn.heats().size(); heat++) {
+          List<Candidate> order = shuffled(sweep, turn, seed, heat);
           blocks.add(new Block(blocks.size(), turn.contest(), turn.instance(), seed, order));
         }
       }
@@ -94,13 +94,12 @@ public record Plan(Sweep sweep, List<Block> blocks) {
     return strata;
   }
 
-  private static List<Candidate> shuffled(List<Candidate> heat, Sweep sweep, Turn turn, long seed) {
-    Digester digester = new Digester();
-    digester.add(sweep.name()).add(turn.contest().family()).add(turn.instance().name()).add(seed);
-    heat.forEach(candidate -> digester.add(candidate.name()));
-    long start = Long.parseUnsignedLong(digester.digest().hex().substring(0, 16), 16);
-    List<Candidate> order = new ArrayList<>(heat);
-    ListSampler.shuffle(new SplitMix64(start), order);
+  /** A heat's candidates in an order of its own for every instance and seed. */
+  private static List<Candidate> shuffled(Sweep sweep, Turn turn, long seed, int heat) {
+    Digester digester = new Digester().add(sweep.name()).add(turn.contest().family());
+    String start = digester.add(turn.instance().name()).add(seed).add(heat).digest().hex();
+    List<Candidate> order = new ArrayList<>(turn.heats().get(heat));
+    ListSampler.shuffle(new SplitMix64(Long.parseUnsignedLong(start.substring(0, 16), 16)), order);
     return order;
   }
 

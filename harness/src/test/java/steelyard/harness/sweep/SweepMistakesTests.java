@@ -396,7 +396,9 @@ class SweepMistakesTests {
             "sweep.yaml:4:77: backends[0].settings.default: 'default' under the backend's own name"
                 + " has no options; name the entry");
     assertThat(with("backends", "[{backend: cpsat, settings: {a/b: {}}}]"))
-        .containsExactly("sweep.yaml:4:40: backends[0].settings.a/b: 'a/b' cannot be a name");
+        .containsExactly(
+            "sweep.yaml:4:40: backends[0].settings.a/b: 'a/b' cannot be a name",
+            "  a name has letters, digits, '.', '-' and '_', at most 64, a letter or digit first");
   }
 
   @Test
@@ -406,6 +408,11 @@ class SweepMistakesTests {
             "sweep.yaml:5:16: limits.work: no amount for 'cpsat'",
             "  a sweep limits every backend by work or none; its units: deterministic-seconds,"
                 + " conflicts");
+    assertThat(
+            with("backends", "[{backend: engine, settings: {a: {}, b: {}}}]", "limits: {work: {}}"))
+        .containsExactly(
+            "sweep.yaml:5:16: limits.work: no amount for 'engine'",
+            "  a sweep limits every backend by work or none; its units: nodes");
     assertThat(withMore("limits: {work: {sat: 10 nodes, cpsat: 0 conflicts, engin: 3 nodes}}"))
         .containsExactly(
             "sweep.yaml:5:22: limits.work.sat: unknown unit 'nodes'; write a number and a unit"

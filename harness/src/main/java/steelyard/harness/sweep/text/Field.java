@@ -22,6 +22,8 @@ public final class Field {
   private static final Pattern WHOLE = Pattern.compile("-?[0-9]{1,18}");
   private static final Pattern NUMBER = Pattern.compile("-?[0-9]{1,18}(\\.[0-9]{1,18})?");
   private static final Pattern NAME = Pattern.compile("[A-Za-z0-9][A-Za-z0-9._-]{0,63}");
+  private static final String NAMES =
+      "a name has letters, digits, '.', '-' and '_', at most 64, a letter or digit first";
 
   private final String path;
   private final Node node;
@@ -95,12 +97,19 @@ public final class Field {
   public Optional<String> name() {
     Optional<String> text = text();
     if (text.isPresent() && !NAME.matcher(text.get()).matches()) {
-      mistake(
-          Phrases.quoted(text.get()) + " cannot be a name",
-          "a name has letters, digits, '.', '-' and '_', at most 64, a letter or digit first");
+      mistake(Phrases.quoted(text.get()) + " cannot be a name", NAMES);
       return Optional.empty();
     }
     return text;
+  }
+
+  /** Whether {@code key}, this value's key, is a name as {@link #name()} takes it. */
+  public boolean isNamed(String key) {
+    boolean named = NAME.matcher(key).matches();
+    if (!named) {
+      mistakeInKey(Phrases.quoted(key) + " cannot be a name", NAMES);
+    }
+    return named;
   }
 
   /** A whole number in {@code low..high}. */
