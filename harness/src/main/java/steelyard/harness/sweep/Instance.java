@@ -2,6 +2,7 @@ package steelyard.harness.sweep;
 
 import java.nio.file.Path;
 import java.time.LocalDate;
+import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalLong;
@@ -15,7 +16,7 @@ import steelyard.results.ledger.Recipe;
  * @param path where it lies, absolute
  * @param content digest of its bytes
  * @param bytes how large it is
- * @param set the set that it belongs to; {@code "-"} for none
+ * @param sets the sets that it belongs to
  * @param instanceClass its class; {@code "-"} for none
  * @param weight its weight in production, positive and finite
  * @param date the day that it is from
@@ -26,20 +27,20 @@ public record Instance(
     Path path,
     Digest content,
     long bytes,
-    String set,
+    List<String> sets,
     String instanceClass,
     double weight,
     Optional<LocalDate> date,
     OptionalLong known) {
 
-  /** The set or class of an instance that has none. */
-  public static final String NONE = "-";
+  /** The class of an instance that has none. */
+  public static final String NO_CLASS = "-";
 
   public Instance {
     Objects.requireNonNull(name, "name");
     Objects.requireNonNull(path, "path");
     Objects.requireNonNull(content, "content");
-    Objects.requireNonNull(set, "set");
+    sets = List.copyOf(sets);
     Objects.requireNonNull(instanceClass, "instanceClass");
     Objects.requireNonNull(date, "date");
     Objects.requireNonNull(known, "known");

@@ -8,6 +8,7 @@ import java.nio.file.Path;
 import java.time.DateTimeException;
 import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
@@ -22,8 +23,8 @@ import steelyard.harness.sweep.text.Place;
 
 /**
  * Reads the table of a folder's instances: comma-separated values after RFC 4180 with a header,
- * column {@code path} and any of {@code set, class, weight, date, known}. An empty cell is as good
- * as no column.
+ * column {@code path} and any of {@code set, class, weight, date, known}. Several sets are parted
+ * by semicolons. An empty cell is as good as no column.
  */
 final class InstanceIndex {
 
@@ -97,7 +98,7 @@ final class InstanceIndex {
     return path.map(
         p ->
             ListedInstance.of(folder, p, row.place)
-                .withLabels(row.label("set"), row.label("class"))
+                .withLabels(row.sets(), row.text("class").orElse(Instance.NO_CLASS))
                 .withFacts(weight.orElse(1.0), date, best));
   }
 
@@ -120,11 +121,15 @@ final class InstanceIndex {
       }
     }
 
-    String label(String column) {
-      return text(column).orElse(Instance.NONE);
+    List<String> sets() {
+      return text("set").stream()
+          .flatMap(sets -> Arrays.stream(sets.split(";", -1)))
+          .map(String::strip)
+          .filter(set -> !set.isEmpty())
+          .toList();
     }
 
-    private Optional<String> text(String column) {
+    Optional<String> text(String column) {
       return Optional.of(column)
           .filter(cells::isMapped)
           .map(cells::get)

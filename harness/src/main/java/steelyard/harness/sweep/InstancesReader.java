@@ -11,6 +11,7 @@ import java.security.DigestInputStream;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -93,8 +94,8 @@ final class InstancesReader {
     Keys keys = Keys.of(item, KEYS);
     List<ListedInstance> found =
         keys.optional("folder").map(this::folder).orElseGet(() -> shipped(item));
-    found = byLabel(found, keys.optional("set"), "set", ListedInstance::set);
-    found = byLabel(found, keys.optional("class"), "class", ListedInstance::instanceClass);
+    found = byLabel(found, keys.optional("set"), "set", ListedInstance::sets);
+    found = byLabel(found, keys.optional("class"), "class", i -> List.of(i.instanceClass()));
     Optional<Field> names = keys.optional("names");
     if (names.isPresent()) {
       found = byName(found, names.get().itemsOrAlone());
@@ -157,11 +158,12 @@ final class InstancesReader {
       List<ListedInstance> from,
       Optional<Field> wanted,
       String kind,
-      Function<ListedInstance, String> label) {
+      Function<ListedInstance, List<String>> labelsOf) {
     if (wanted.isEmpty() || from.isEmpty()) {
       return from;
     }
-    List<String> known = from.stream().map(label).distinct().sorted().toList();
+    List<String> known =
+        from.stream().flatMap(i -> labelsOf.apply(i).stream()).distinct().sorted().toList();
     Set<String> labels = new LinkedHashSet<>();
     for (Field item : wanted.get().itemsOrAlone()) {
       Optional<String> text = item.text();
@@ -170,7 +172,7 @@ final class InstancesReader {
       }
       text.ifPresent(labels::add);
     }
-    return from.stream().filter(i -> labels.contains(label.apply(i))).toList();
+    return from.stream().filter(i -> !Collections.disjoint(labels, labelsOf.apply(i))).toList();
   }
 
   private static List<ListedInstance> byName(List<ListedInstance> from, List<Field> patterns) {
@@ -218,7 +220,7 @@ final class InstancesReader {
           listed.path().toAbsolutePath(),
           sha256(listed.path()),
           Files.size(listed.path()),
-          listed.set(),
+          listed.sets(),
           listed.instanceClass(),
           listed.weight(),
           listed.date(),

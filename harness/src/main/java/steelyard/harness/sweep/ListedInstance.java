@@ -2,6 +2,7 @@ package steelyard.harness.sweep;
 
 import java.nio.file.Path;
 import java.time.LocalDate;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
 import steelyard.harness.sweep.text.Place;
@@ -16,7 +17,7 @@ record ListedInstance(
     String name,
     Path path,
     Place place,
-    String set,
+    List<String> sets,
     String instanceClass,
     double weight,
     Optional<LocalDate> date,
@@ -27,19 +28,19 @@ record ListedInstance(
         nameOf(folder.relativize(file)),
         file,
         place,
-        Instance.NONE,
-        Instance.NONE,
+        List.of(),
+        Instance.NO_CLASS,
         1,
         Optional.empty(),
         OptionalLong.empty());
   }
 
-  ListedInstance withLabels(String newSet, String newClass) {
-    return new ListedInstance(name, path, place, newSet, newClass, weight, date, known);
+  ListedInstance withLabels(List<String> newSets, String newClass) {
+    return new ListedInstance(name, path, place, newSets, newClass, weight, date, known);
   }
 
   ListedInstance withFacts(double newWeight, Optional<LocalDate> newDate, OptionalLong newKnown) {
-    return new ListedInstance(name, path, place, set, instanceClass, newWeight, newDate, newKnown);
+    return new ListedInstance(name, path, place, sets, instanceClass, newWeight, newDate, newKnown);
   }
 
   /** The path with slashes, without an extension that starts with a letter. */

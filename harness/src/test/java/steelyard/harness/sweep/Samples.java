@@ -129,7 +129,7 @@ final class Samples {
         Path.of("/data", name),
         digest(name),
         bytes,
-        Instance.NONE,
+        List.of(),
         instanceClass,
         weight,
         Optional.empty(),

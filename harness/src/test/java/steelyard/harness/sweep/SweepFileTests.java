@@ -104,7 +104,7 @@ class SweepFileTests {
     assertThat(first.content())
         .isEqualTo(new Digest("ba7816bf8f01cfea414140de5dae2223b00361a396177a9cb410ff61f20015ad"));
     assertThat(first.bytes()).isEqualTo(3);
-    assertThat(first.set()).isEqualTo("spring");
+    assertThat(first.sets()).containsExactly("spring", "trouble");
     assertThat(first.instanceClass()).isEqualTo("large");
     assertThat(first.weight()).isEqualTo(3);
     assertThat(first.date()).contains(LocalDate.of(2026, 3, 2));
@@ -197,6 +197,8 @@ class SweepFileTests {
   void selectsInstances_bySetAndClass() {
     assertThat(instances(withInstances("{set: autumn, class: large}")))
         .containsExactly("autumn/12", "autumn/20");
+    assertThat(instances(withInstances("{set: trouble}")))
+        .containsExactly("autumn/11", "spring/a1");
     assertThat(instances(withInstances("[{class: small}, {set: [autumn, spring], names: '*2'}]")))
         .containsExactly("autumn/11", "spring/b1", "autumn/12", "spring/a2");
   }

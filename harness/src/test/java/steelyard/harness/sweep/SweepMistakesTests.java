@@ -480,7 +480,7 @@ class SweepMistakesTests {
                 + " 'spring/a1'?)",
             "  known: autumn/11, autumn/12, autumn/20, spring/a1, spring/a2, spring/b1",
             "sweep.yaml:5:30: instances[1].set: unknown set 'sprin' (did you mean 'spring'?)",
-            "  known: autumn, spring");
+            "  known: autumn, spring, trouble");
     assertThat(withMore("instances: {class: [large, midling]}"))
         .containsExactly(
             "sweep.yaml:5:28: instances.class[1]: unknown class 'midling'",
