@@ -1,11 +1,7 @@
 package steelyard.harness.sweep;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
-import java.util.function.Function;
-import steelyard.results.ledger.Cell;
-import steelyard.results.ledger.RunKey;
 
 /**
  * Runs that belong together for a fair comparison: candidates on one instance and seed, one after
@@ -35,20 +31,5 @@ public record Block(
         throw new IllegalArgumentException(order.get(i) + " comes twice in block " + number);
       }
     }
-  }
-
-  /** The block as the ledger keeps it, once every run's key is known. */
-  public steelyard.results.ledger.Block forLedger(Function<Candidate, RunKey> keys) {
-    List<Cell> cells = new ArrayList<>();
-    for (Candidate candidate : order) {
-      cells.add(
-          new Cell(
-              cells.size(),
-              contest.recipe(candidate, instance),
-              candidate.setup().backend(),
-              candidate.setup().setting(),
-              keys.apply(candidate)));
-    }
-    return new steelyard.results.ledger.Block(number, seed, cells);
   }
 }

@@ -7,7 +7,6 @@ import java.util.Map;
 import java.util.Objects;
 import org.apache.commons.rng.core.source64.SplitMix64;
 import org.apache.commons.rng.sampling.ListSampler;
-import steelyard.results.ledger.Digest;
 import steelyard.variants.model.Digester;
 
 /**
@@ -101,14 +100,6 @@ public record Plan(Sweep sweep, List<Block> blocks) {
     List<Candidate> order = new ArrayList<>(turn.heats().get(heat));
     ListSampler.shuffle(new SplitMix64(Long.parseUnsignedLong(start.substring(0, 16), 16)), order);
     return order;
-  }
-
-  /**
-   * Digest of all that decides who runs on what, in which order and under which limits: equal
-   * digests are one sweep that can be resumed. Notes and how results are judged are no part of it.
-   */
-  public Digest digest() {
-    return PlanDigest.of(sweep);
   }
 
   /** How large the plan is. */

@@ -9,7 +9,6 @@ import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalLong;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.function.Function;
@@ -62,16 +61,7 @@ public final class SingleChoice {
     Path file = Path.of(text);
     if (Files.isRegularFile(file)) {
       Path absolute = file.toAbsolutePath();
-      return read(
-          new ListedInstance(
-              file.getFileName().toString(),
-              absolute,
-              Place.of(text),
-              Instance.NONE,
-              Instance.NONE,
-              1,
-              Optional.empty(),
-              OptionalLong.empty()));
+      return read(ListedInstance.of(absolute.getParent(), absolute, Place.of(text)));
     }
     List<String> names = shipped.stream().map(ListedInstance::name).toList();
     throw new SweepProblem(
@@ -80,7 +70,7 @@ public final class SingleChoice {
             "  " + Phrases.known(names)));
   }
 
-  /** The instances that a family ships, a line each: name, class, set, best known objective. */
+  /** The instances that a family ships, a line each: name, class, sets, best known objective. */
   public static List<String> listed(Catalogue.Family family) {
     return family
         .instances()
@@ -93,7 +83,7 @@ public final class SingleChoice {
                     .formatted(
                         it.name(),
                         it.instanceClass(),
-                        it.set(),
+                        String.join(", ", it.sets()),
                         it.known().isPresent() ? "best known " + it.known().getAsLong() : ""))
         .map(String::stripTrailing)
         .toList();
@@ -106,7 +96,7 @@ public final class SingleChoice {
           listed.path(),
           InstancesReader.sha256(listed.path()),
           Files.size(listed.path()),
-          listed.set(),
+          listed.sets(),
           listed.instanceClass(),
           listed.weight(),
           listed.date(),
