@@ -102,7 +102,7 @@ final class Comparing {
         before.model().equals(after.model())
             && before.backend().equals(after.backend())
             && before.setting().equals(after.setting());
-    return same
+    return same || before.run().equals(after.run())
         ? new Comparison(Outcome.UNCHANGED, Ground.NONE)
         : rule.compare(Measure.attainment(before), Measure.attainment(after));
   }

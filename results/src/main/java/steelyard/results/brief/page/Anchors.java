@@ -21,17 +21,27 @@ public final class Anchors {
     manyFamilies = facts.scope().families().size() > 1;
     manySeeds = facts.scope().seeds().size() > 1;
     for (Run run : facts.runs()) {
+      if (runs.putIfAbsent(run.run(), run) != null) {
+        continue;
+      }
       String plain = run.run().replaceAll("[^A-Za-z0-9._-]", "_");
       String cut = plain.length() > 60 ? plain.substring(0, 60) : plain;
       String unique = cut.equals(run.run()) ? cut : cut + "-" + anchors.size();
       anchors.put(run.run(), "run-" + unique);
-      runs.put(run.run(), run);
     }
   }
 
   /** The anchor of a run; that of the whole table for one that is not in the page. */
   public String of(String run) {
     return anchors.getOrDefault(run, "runs");
+  }
+
+  /**
+   * The anchor that a row of the table of runs carries; {@code null}, which leaves the attribute
+   * out, for a run that stands for several candidates and has a row already.
+   */
+  public String own(Run run) {
+    return run.equals(runs.get(run.run())) ? of(run.run()) : null;
   }
 
   /** An instance as it is told apart from the others of this brief. */
