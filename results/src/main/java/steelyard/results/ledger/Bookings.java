@@ -4,6 +4,7 @@ import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.util.Comparator;
 import java.util.HashMap;
+import java.util.Locale;
 import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -31,7 +32,7 @@ final class Bookings {
         WHERE s.name = ?1)
       SELECT b.number, k.position, k.block, k.candidate, coalesce(p.problem, r.problem, 0),
         k.nearness, r.id, r.name, r.attempt, r.disturbed,
-        r.model, m.as_built, r.lower_ns + r.solve_ns + r.answer_ns, r.limits, r.ending, r.rss,
+        r.model, hex(m.as_built) || hex(m.search), r.lower_ns + r.solve_ns + r.answer_ns, r.limits, r.ending, r.rss,
         a.adapter, r.status, r.minimize, r.objective, r.bound, %s
       FROM booked k JOIN block b ON b.id = k.block JOIN run r ON r.id = k.run
         JOIN backend_build a ON a.id = r.backend_build
@@ -46,7 +47,8 @@ final class Bookings {
    * @param candidate the candidate's row
    * @param problem the row of the problem that the cell poses; 0 if it is not known
    * @param nearness 2 for the cell's own run, 1 for one of its block, 0 for one taken over
-   * @param model digest of the model as built; a text of its own where none was built
+   * @param model digests of the model as built and of its branching and hint, one after the other;
+   *     a text of its own where none was built
    * @param limits the row of the limits
    */
   record Booking(
@@ -117,7 +119,7 @@ final class Bookings {
     }
     String known = models.get(id);
     if (known == null) {
-      known = Digest.of(row.getBytes(12)).hex();
+      known = row.getString(12).toLowerCase(Locale.ROOT);
       models.put(id, known);
     }
     return known;

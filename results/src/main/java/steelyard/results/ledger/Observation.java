@@ -18,7 +18,8 @@ import java.util.OptionalLong;
  * @param setting the setting's name
  * @param seed the seed
  * @param block the block's number within its sweep
- * @param model digest of the model as built; equal digests are identical models
+ * @param model digests of the model as built and of its branching and hint; runs with equal ones
+ *     solved the identical model
  * @param seconds wall seconds of lower, solve and answer, at most the limit
  * @param limits what the run was allowed
  * @param status what it established

@@ -149,6 +149,13 @@ class BriefTest {
   }
 
   @Test
+  void aRunThatStandsForBoth_isUnchanged() {
+    Facts facts = twoOf(proved("A", "i1", 1).run("r1"), proved("B", "i1", 1).run("r1"));
+
+    assertThat(onlyTally(facts)).isEqualTo(new Tally(0, 0, 0, 0, 1));
+  }
+
+  @Test
   void theSameModelOnAnotherBackend_isNotUnchanged() {
     Facts facts =
         twoOf(
@@ -225,7 +232,8 @@ class BriefTest {
 
     assertThat(facts.candidates().get(1).score().penalisedMean()).hasValue(120);
     assertThat(facts.troubles().get(0))
-        .isEqualTo(new Trouble(Gravity.WRONG, "B on cpsat crashed (1 run).", List.of("B.i1.0.1")));
+        .isEqualTo(
+            new Trouble(Gravity.WRONG, "B on cpsat crashed (1 run).", List.of("B.cpsat.i1.0.1")));
   }
 
   @Test

@@ -141,7 +141,8 @@ public final class RunMaker {
   }
 
   public Observation make() {
-    String id = run.isEmpty() ? variant + "." + instance + "." + seed + "." + block : run;
+    String id =
+        run.isEmpty() ? variant + "." + backend + "." + instance + "." + seed + "." + block : run;
     return new Observation(
         id,
         family,

@@ -46,7 +46,8 @@ class ObservationsTest {
                 "default",
                 11,
                 4,
-                record.model().orElseThrow().asBuilt().hex(),
+                record.model().orElseThrow().asBuilt().hex()
+                    + record.model().orElseThrow().search().hex(),
                 0.5,
                 Sample.MINUTE,
                 Status.OPTIMAL,

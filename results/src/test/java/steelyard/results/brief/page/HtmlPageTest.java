@@ -169,6 +169,17 @@ class HtmlPageTest {
   }
 
   @Test
+  void aRunThatStandsForSeveralCandidates_hasOneAnchor() {
+    String page =
+        page(
+            RunMaker.proved("plain", "i1", 1).run("r1").make(),
+            RunMaker.proved("other", "i1", 1).run("r1").make());
+
+    assertThat(all("id=\"(run-r1)\"", page)).hasSize(1);
+    assertThat(all("<code>(steelyard rerun r1)</code>", page)).hasSize(2);
+  }
+
+  @Test
   void saysHowFarItIs_whileTheSweepRuns() {
     String partial = HtmlPage.html(Brief.of(Sample.context(400, 160), Sample.runs(20, 4, 2)));
 
