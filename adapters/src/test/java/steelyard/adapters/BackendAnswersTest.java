@@ -82,7 +82,7 @@ class BackendAnswersTest {
         row("ft06", "plain", 0, 55),
         row("ft06", "plain+no-overlap", 1, 55),
         row("ft06", "plain+no-overlap+orders+order-first", 0, 55),
-        row("la01", "plain+no-overlap", 0, 666),
+        row("la01", "plain+no-overlap+load-bound", 0, 666),
         row("la05", "plain+no-overlap+load-bound", 0, 593),
         row("floor-4x4", "plain", 1, 37),
         row("twins-4x3", "plain", 2, 14));

@@ -74,7 +74,7 @@ class FamilyContractTest {
       List<Case<?>> cases = new ArrayList<>();
       for (String row : Files.readAllLines(folder.resolve("instances.csv"))) {
         List<String> cells = List.of(row.split(",", -1));
-        if (cells.get(1).equals("tiny")) {
+        if (List.of(cells.get(1).split(";", -1)).contains("tiny")) {
           InstanceSource source = new InstanceSource(cells.get(0), folder.resolve(cells.get(0)));
           cases.add(new Case<>(family, source.name(), family.read(source)));
         }
