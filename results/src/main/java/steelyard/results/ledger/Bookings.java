@@ -4,7 +4,6 @@ import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.util.Comparator;
 import java.util.HashMap;
-import java.util.Locale;
 import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -32,8 +31,9 @@ final class Bookings {
         WHERE s.name = ?1)
       SELECT b.number, k.position, k.block, k.candidate, coalesce(p.problem, r.problem, 0),
         k.nearness, r.id, r.name, r.attempt, r.disturbed,
-        r.model, hex(m.as_built) || hex(m.search), r.lower_ns + r.solve_ns + r.answer_ns, r.limits, r.ending, r.rss,
-        a.adapter, r.status, r.minimize, r.objective, r.bound, %s
+        r.model, m.as_built, m.search,
+        r.lower_ns + r.solve_ns + r.answer_ns, r.limits, r.ending, r.rss, a.adapter,
+        r.status, r.minimize, r.objective, r.bound, %s
       FROM booked k JOIN block b ON b.id = k.block JOIN run r ON r.id = k.run
         JOIN backend_build a ON a.id = r.backend_build
         LEFT JOIN recipe_model p ON p.recipe = k.recipe
@@ -105,11 +105,11 @@ final class Bookings {
         row.getInt(9),
         row.getBoolean(10),
         model(row, run),
-        row.getLong(13),
         row.getLong(14),
-        Codes.ENDING.word(row.getInt(15)),
-        row.getLong(16),
-        Evidence.answer(row, 17));
+        row.getLong(15),
+        Codes.ENDING.word(row.getInt(16)),
+        row.getLong(17),
+        Evidence.answer(row, 18));
   }
 
   private String model(ResultSet row, String run) throws SQLException {
@@ -119,7 +119,7 @@ final class Bookings {
     }
     String known = models.get(id);
     if (known == null) {
-      known = row.getString(12).toLowerCase(Locale.ROOT);
+      known = Digest.of(row.getBytes(12)).hex() + Digest.of(row.getBytes(13)).hex();
       models.put(id, known);
     }
     return known;

@@ -2,10 +2,8 @@ package steelyard.results.ledger;
 
 import java.sql.ResultSet;
 import java.sql.SQLException;
-import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.HashSet;
-import java.util.List;
 import java.util.Map;
 import java.util.OptionalLong;
 import java.util.Set;
@@ -50,12 +48,11 @@ final class Evidence {
   /** How the claim of one run stands. */
   static Standing standingOf(Store store, String run) {
     Evidence evidence = about(store, PROBLEM_OF_RUN, run);
-    List<Standing> standings = new ArrayList<>();
-    store.scan(
-        ANSWER_OF_RUN,
-        row -> standings.add(evidence.standing(row.getLong(1), answer(row, 2))),
-        run);
-    return standings.isEmpty() ? new Standing(Claim.NONE, 0) : standings.get(0);
+    return store
+        .list(ANSWER_OF_RUN, row -> evidence.standing(row.getLong(1), answer(row, 2)), run)
+        .stream()
+        .findFirst()
+        .orElse(new Standing(Claim.NONE, 0));
   }
 
   private static Evidence about(Store store, String problems, String name) {

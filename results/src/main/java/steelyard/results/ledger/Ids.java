@@ -76,7 +76,7 @@ final class Ids {
 
   long sweep(String id, String name) {
     return rows.find("SELECT id FROM sweep WHERE name = ?", id)
-        .orElseGet(() -> rows.id("sweep", "name", id, "title", name));
+        .orElseGet(() -> rows.add("INSERT INTO sweep (name, title) VALUES (?, ?)", id, name));
   }
 
   long session(Session session) {

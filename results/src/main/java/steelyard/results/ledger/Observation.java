@@ -9,17 +9,18 @@ import java.util.OptionalLong;
  * record, verdicts as they stand now.
  *
  * @param run the run's id, as {@code show} takes it
- * @param family the family's name, with its alias where it has one
+ * @param family the family's name
  * @param instance the instance's name within its family
  * @param instanceClass the instance's class; {@code "-"} where it has none
  * @param weight the instance's weight in production; 1 where none is given
- * @param variant the variant's name, such as {@code plain+load-bound}
+ * @param variant the variant's name, such as {@code plain+load-bound}, with the alias of the
+ *     family's jar where it has one: {@code plain@old}
  * @param backend the backend's name in the sweep file
  * @param setting the setting's name
  * @param seed the seed
  * @param block the block's number within its sweep
  * @param model digests of the model as built and of its branching and hint; runs with equal ones
- *     solved the identical model
+ *     solved the identical model; one that built none has a text of its own
  * @param seconds wall seconds of lower, solve and answer, at most the limit
  * @param limits what the run was allowed
  * @param status what it established

@@ -5,7 +5,6 @@ import java.sql.SQLException;
 import java.time.Instant;
 import java.util.List;
 import java.util.Optional;
-import org.jdbi.v3.core.Handle;
 
 /** What is to be run: sweeps and their blocks. */
 public final class Plans {
@@ -22,6 +21,12 @@ public final class Plans {
       GROUP BY s.id
       ORDER BY began, s.id"""
           .formatted(Codes.ENDING.of(Ending.STOPPED));
+
+  private static final String PLANS =
+      """
+      SELECT s.name, s.title, p.planned, p.plan, p.in_service, p.file
+      FROM sweep s JOIN sweep_plan p ON p.sweep = s.id
+      WHERE %s = ? ORDER BY p.planned DESC, s.id DESC""";
 
   private final Store store;
 
@@ -64,17 +69,17 @@ public final class Plans {
 
   /** Every sweep, the oldest first. */
   public List<SweepSummary> sweeps() {
-    return store.read(handle -> handle.select(SUMMARIES).map((row, c) -> summary(row)).list());
+    return store.list(SUMMARIES, Plans::summary);
   }
 
   /** The plan of a sweep; empty if it is unknown or only its runs are known. */
   public Optional<Sweep> find(String sweep) {
-    return store.read(handle -> plans(handle, "s.name = ?", sweep).stream().findFirst());
+    return store.list(PLANS.formatted("s.name"), Plans::plan, sweep).stream().findFirst();
   }
 
   /** The plan of the newest sweep of a name. */
   public Optional<Sweep> latest(String name) {
-    return store.read(handle -> plans(handle, "s.title = ?", name).stream().findFirst());
+    return store.list(PLANS.formatted("s.title"), Plans::plan, name).stream().findFirst();
   }
 
   /** The blocks of a sweep by number, their cells by position; empty for an unknown sweep. */
@@ -126,25 +131,14 @@ public final class Plans {
                     "sweep '%s' is not in the ledger".formatted(sweep), "add it first"));
   }
 
-  private static List<Sweep> plans(Handle handle, String condition, String value) {
-    return handle
-        .select(
-            """
-            SELECT s.name, s.title, p.planned, p.plan, p.in_service, p.file
-            FROM sweep s JOIN sweep_plan p ON p.sweep = s.id
-            WHERE %s ORDER BY p.planned DESC, s.id DESC"""
-                .formatted(condition),
-            value)
-        .map(
-            (row, context) ->
-                new Sweep(
-                    row.getString(1),
-                    row.getString(2),
-                    Instant.ofEpochMilli(row.getLong(3)),
-                    Digest.of(row.getBytes(4)),
-                    Optional.ofNullable(row.getString(5)),
-                    row.getString(6)))
-        .list();
+  private static Sweep plan(ResultSet row) throws SQLException {
+    return new Sweep(
+        row.getString(1),
+        row.getString(2),
+        Instant.ofEpochMilli(row.getLong(3)),
+        Digest.of(row.getBytes(4)),
+        Optional.ofNullable(row.getString(5)),
+        row.getString(6));
   }
 
   private static SweepSummary summary(ResultSet row) throws SQLException {

@@ -3,7 +3,9 @@ package steelyard.results.ledger;
 import java.util.Collections;
 import java.util.HashSet;
 import java.util.Set;
+import java.util.SortedMap;
 import java.util.SortedSet;
+import java.util.TreeMap;
 import java.util.TreeSet;
 
 /** What of a plan need not be run, because it was. */
@@ -85,5 +87,20 @@ public final class Progress {
         row -> cells.add(new CellId(row.getInt(1), row.getInt(2))),
         sweep);
     return cells;
+  }
+
+  /**
+   * How many runs each cell of a sweep has had, stopped ones included; cells without are left out.
+   */
+  public SortedMap<CellId, Integer> attempts(String sweep) {
+    SortedMap<CellId, Integer> attempts = new TreeMap<>();
+    store.scan(
+        """
+        SELECT b.number, r.position, count(*)
+        FROM sweep w JOIN block b ON b.sweep = w.id JOIN run r ON r.block = b.id
+        WHERE w.name = ? GROUP BY b.id, r.position""",
+        row -> attempts.put(new CellId(row.getInt(1), row.getInt(2)), row.getInt(3)),
+        sweep);
+    return attempts;
   }
 }

@@ -2,6 +2,7 @@ package steelyard.results.ledger;
 
 import java.io.IOException;
 import java.nio.file.AccessDeniedException;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.NotDirectoryException;
@@ -14,6 +15,9 @@ final class Reasons {
   static String of(IOException e) {
     if (e instanceof NoSuchFileException || e instanceof NotDirectoryException) {
       return "no such folder or file";
+    }
+    if (e instanceof FileAlreadyExistsException) {
+      return "a file stands where a folder is needed";
     }
     if (e instanceof AccessDeniedException) {
       return "permission denied";

@@ -31,12 +31,12 @@ final class Rows {
   /** Runs one INSERT and returns the new row's id. */
   long add(String insert, Object... values) {
     run(insert, values);
-    return handle.select("SELECT last_insert_rowid()").mapTo(Long.class).one();
+    return handle.select("SELECT last_insert_rowid()").map((row, context) -> row.getLong(1)).one();
   }
 
   /** The first column of the only row, if there is one. */
   Optional<Long> find(String query, Object... values) {
-    return handle.select(query, values).mapTo(Long.class).findOne();
+    return handle.select(query, values).map((row, context) -> row.getLong(1)).findOne();
   }
 
   /**

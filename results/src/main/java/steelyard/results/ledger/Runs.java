@@ -49,16 +49,12 @@ public final class Runs {
    */
   public String resolve(String beginning) {
     List<String> ids =
-        store.read(
-            handle ->
-                handle
-                    .select(
-                        "SELECT name FROM run WHERE name >= ? AND name < ? ORDER BY name LIMIT ?",
-                        beginning,
-                        beginning + Character.MAX_VALUE,
-                        MOST_LISTED + 1)
-                    .mapTo(String.class)
-                    .list());
+        store.list(
+            "SELECT name FROM run WHERE name >= ? AND name < ? ORDER BY name LIMIT ?",
+            row -> row.getString(1),
+            beginning,
+            beginning + Character.MAX_VALUE,
+            MOST_LISTED + 1);
     if (ids.isEmpty()) {
       throw new LedgerProblem(
           "%s: no run's id begins with '%s'".formatted(store.file(), Text.head(beginning, 80)),

@@ -22,36 +22,29 @@ public final class Sessions {
 
   /** A session by its id. */
   public Optional<Session> find(String id) {
-    return store.read(
-        handle ->
-            handle
-                .select(
-                    """
-                    SELECT s.name, s.harness, m.class, m.facts, s.launch, s.started
-                    FROM session s JOIN machine m ON m.id = s.machine WHERE s.name = ?""",
-                    id)
-                .map((row, context) -> session(row))
-                .findOne());
+    return store
+        .list(
+            """
+            SELECT s.name, s.harness, m.class, m.facts, s.launch, s.started
+            FROM session s JOIN machine m ON m.id = s.machine WHERE s.name = ?""",
+            Sessions::session,
+            id)
+        .stream()
+        .findFirst();
   }
 
   /** The sessions in which runs of a sweep were made, in order. */
   public List<Session> of(String sweep) {
-    return store.read(
-        handle ->
-            handle
-                .select(
-                    """
-                    SELECT s.name, s.harness, m.class, m.facts, s.launch, s.started
-                    FROM session s JOIN machine m ON m.id = s.machine
-                    WHERE s.id IN (
-                      SELECT r.session FROM run r
-                      JOIN block b ON b.id = r.block
-                      JOIN sweep w ON w.id = b.sweep
-                      WHERE w.name = ?)
-                    ORDER BY s.id""",
-                    sweep)
-                .map((row, context) -> session(row))
-                .list());
+    return store.list(
+        """
+        SELECT s.name, s.harness, m.class, m.facts, s.launch, s.started
+        FROM session s JOIN machine m ON m.id = s.machine
+        WHERE s.id IN
+          (SELECT r.session FROM sweep w JOIN block b ON b.sweep = w.id JOIN run r ON r.block = b.id
+          WHERE w.name = ?)
+        ORDER BY s.id""",
+        Sessions::session,
+        sweep);
   }
 
   /**
@@ -78,23 +71,18 @@ public final class Sessions {
 
   /** What the calibrations of a session gave, in order. */
   public List<Calibration> calibrations(String session) {
-    return store.read(
-        handle ->
-            handle
-                .select(
-                    """
-                    SELECT c.at, c.ns, c.steal_ns, c.swapped_pages
-                    FROM calibration c JOIN session s ON s.id = c.session
-                    WHERE s.name = ? ORDER BY c.id""",
-                    session)
-                .map(
-                    (row, context) ->
-                        new Calibration(
-                            Instant.ofEpochMilli(row.getLong(1)),
-                            row.getLong(2),
-                            row.getLong(3),
-                            row.getLong(4)))
-                .list());
+    return store.list(
+        """
+        SELECT c.at, c.ns, c.steal_ns, c.swapped_pages
+        FROM calibration c JOIN session s ON s.id = c.session
+        WHERE s.name = ? ORDER BY c.id""",
+        row ->
+            new Calibration(
+                Instant.ofEpochMilli(row.getLong(1)),
+                row.getLong(2),
+                row.getLong(3),
+                row.getLong(4)),
+        session);
   }
 
   private static long idOf(Rows rows, String session) {

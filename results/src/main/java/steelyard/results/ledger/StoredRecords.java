@@ -21,7 +21,7 @@ final class StoredRecords {
     Optional<Long> basis =
         handle
             .select("SELECT run FROM session_basis WHERE session = ?", session)
-            .mapTo(Long.class)
+            .map((row, context) -> row.getLong(1))
             .findOne();
     handle.execute(
         "INSERT INTO record (run, basis, zlib) VALUES (?, ?, ?)",
@@ -43,7 +43,11 @@ final class StoredRecords {
    * @throws LedgerProblem if it is damaged
    */
   RunRecord record(String run) {
-    long id = handle.select("SELECT id FROM run WHERE name = ?", run).mapTo(Long.class).one();
+    long id =
+        handle
+            .select("SELECT id FROM run WHERE name = ?", run)
+            .map((row, context) -> row.getLong(1))
+            .one();
     return RunRecords.fromJson(json(id), "run " + run);
   }
 

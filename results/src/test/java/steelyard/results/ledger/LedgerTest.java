@@ -174,6 +174,19 @@ class LedgerTest {
   }
 
   @Test
+  void says_so_given_a_file_in_place_of_a_folder() throws IOException {
+    Files.createFile(file);
+    Path below = file.resolve("ledger.db");
+
+    assertThatThrownBy(() -> Ledger.write(below, NIGHTLY))
+        .isInstanceOf(LedgerProblem.class)
+        .hasMessageStartingWith(below + ": a file stands where a folder is needed; ");
+    assertThatThrownBy(() -> Ledger.read(below))
+        .isInstanceOf(LedgerProblem.class)
+        .hasMessageStartingWith(below + ": there is no ledger; ");
+  }
+
+  @Test
   void says_so_given_a_newer_version_and_leaves_it_alone() throws SQLException {
     Ledger.write(file, NIGHTLY).close();
     execute("PRAGMA user_version = 99");

@@ -154,6 +154,9 @@ class PlansTest {
 
     assertThat(sessions.find(Sample.NIGHT.id())).contains(Sample.NIGHT);
     assertThat(sessions.calibrations(Sample.NIGHT.id())).containsExactly(before, after);
+    assertThat(sessions.of("sweep-1")).isEmpty();
+    ledger.runs().collect(Sample.run("run-0").record());
+    assertThat(sessions.of("sweep-1")).containsExactly(Sample.NIGHT);
     assertThat(sessions.find("session-9")).isEmpty();
     assertThatThrownBy(() -> sessions.addCalibration("session-9", before))
         .isInstanceOf(LedgerProblem.class)

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.TreeMap;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
@@ -62,6 +63,15 @@ class ProgressTest {
         .collect(Sample.run("run-1").attempt(1).limits(Sample.WORK).key(Sample.key("a")).record());
     assertThat(progress.finished("sweep-1")).containsExactly(new CellId(0, 0));
     assertThat(progress.reusableKeys(HERE)).containsExactly(Sample.key("a"));
+  }
+
+  @Test
+  void counts_the_attempts_at_a_cell() {
+    plan("sweep-1", "a", "b");
+    ledger.runs().collect(work("run-0", Ending.STOPPED));
+    ledger.runs().collect(Sample.run("run-1").attempt(1).key(Sample.key("a")).record());
+
+    assertThat(progress.attempts("sweep-1")).containsExactly(Map.entry(new CellId(0, 0), 2));
   }
 
   @Test
