@@ -15,8 +15,8 @@ import java.util.List;
 import java.util.UUID;
 
 /**
- * Archives of loaded classes (application class-data sharing, JEP 350), which halve the start of a
- * worker. One is made at first use and kept in the cache.
+ * Archives of loaded classes (application class-data sharing, JEP 350), which shorten the start of
+ * a worker. One is made at first use and kept in the cache.
  *
  * <p>An archive holds for one JVM and for jars at the same absolute paths with the same time of
  * change; the JVM silently ignores any other. Its name is therefore a digest of these and of the

@@ -36,6 +36,12 @@ public record JavaCommand(
   public static final Set<String> WITHHELD =
       Set.of("JAVA_TOOL_OPTIONS", "JDK_JAVA_OPTIONS", "_JAVA_OPTIONS", "CLASSPATH");
 
+  /**
+   * Exit code when the heap is exhausted: what {@code -XX:+ExitOnOutOfMemoryError} ends with in the
+   * JDKs from 17 to 25 (seen, not documented).
+   */
+  public static final int HEAP_EXHAUSTED = 3;
+
   private static final long MEBIBYTE = 1L << 20;
   private static final long LEAST_HEAP = 32 * MEBIBYTE;
 

@@ -52,38 +52,47 @@ public final class Watch {
     Kin.Ended ended;
     long endNanos;
     try {
-      look();
-      while (!killed && !child.awaitFirst(untilNextLook())) {
-        look();
-      }
-    } catch (InterruptedException e) {
-      interrupted = true;
-      kill(Reason.STOPPED);
+      interrupted = interruptedBeforeTheEnd();
     } finally {
       endNanos = System.nanoTime();
       ended = child.end();
     }
-    if (reason.isEmpty() && stop.position() == Position.KILL) {
-      kill(Reason.STOPPED); // somebody ended it between two looks
-    }
-    awaitCode();
     if (ended.found() > 0) {
       endNanos = System.nanoTime();
     }
+    if (stop.position() == Position.KILL && reason.isEmpty()) {
+      kill(Reason.STOPPED); // it was ended between two looks, by the one who threw the switch
+    }
     takeMarks(endNanos);
     clocks.stopAt(endNanos);
+    interrupted |= interruptedBeforeTheCode();
     if (interrupted) {
       Thread.currentThread().interrupt();
     }
     return exit(endNanos, ended);
   }
 
-  /** The kernel tells the code a moment after the process has gone. */
-  private void awaitCode() {
+  /** Looks until the first process has ended or all are to be killed. */
+  private boolean interruptedBeforeTheEnd() {
+    try {
+      look();
+      while (!killed && !child.awaitFirst(untilNextLook())) {
+        look();
+      }
+      return false;
+    } catch (InterruptedException e) {
+      kill(Reason.STOPPED);
+      return true;
+    }
+  }
+
+  /** The code of a process is known a moment after it has gone. */
+  private boolean interruptedBeforeTheCode() {
     try {
       child.awaitFirst(CODE_WITHIN_NANOS);
+      return false;
     } catch (InterruptedException e) {
-      Thread.currentThread().interrupt();
+      return true;
     }
   }
 

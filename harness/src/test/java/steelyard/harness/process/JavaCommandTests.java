@@ -4,11 +4,13 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -75,14 +77,27 @@ class JavaCommandTests {
   }
 
   @Test
-  void keeps_archive_valid_whenAFamilyIsAppended() throws IOException {
+  void ends_with_itsOwnCode_whenTheHeapIsExhausted() throws IOException {
+    JavaCommand command = command(classPath, "fill");
+    command.makeFolders();
+
+    assertThat(run(command.line()).code()).hasValue(JavaCommand.HEAP_EXHAUSTED);
+  }
+
+  @Test
+  void keeps_archive_valid_whenMadeTwiceAtATime_andAFamilyIsAppended() throws IOException {
     useJarsWithoutSpaces();
     ClassArchive archives =
         new ClassArchive(
             new CacheFolder(temporary.resolve("my cache"), Optional.empty()),
             Launcher.unnoted(Tools.detect()));
     JavaCommand training = command(classPath.withoutFamily());
-    Path archive = archives.of(training, trial.stop);
+    Path archive =
+        Stream.of(training, training)
+            .parallel()
+            .map(command -> make(archives, command))
+            .reduce((first, second) -> first)
+            .orElseThrow();
     List<String> line = new ArrayList<>(command(classPath).with(archive).line());
     line.add(1, "-Xlog:class+load:file=" + LOADED);
     Exit exit = run(line);
@@ -96,6 +111,14 @@ class JavaCommandTests {
     assertThat(archives.of(training, trial.stop)).isEqualTo(archive);
     try (var files = Files.list(archive.getParent())) {
       assertThat(files).containsExactly(archive);
+    }
+  }
+
+  private Path make(ClassArchive archives, JavaCommand training) {
+    try {
+      return archives.of(training, trial.stop);
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
     }
   }
 

@@ -16,6 +16,9 @@ final class ReportProgram {
     for (String arg : args) {
       say("argument", arg);
     }
+    if (args.length > 0 && args[0].equals("fill")) {
+      say("filled", Integer.toString(new byte[1 << 20][1 << 20].length));
+    }
     if (args.length > 1 && args[0].equals("load")) {
       System.loadLibrary(args[1]);
       say("loaded", args[1]);
