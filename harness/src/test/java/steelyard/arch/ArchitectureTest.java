@@ -15,7 +15,6 @@ import com.tngtech.archunit.core.importer.ImportOption;
 import com.tngtech.archunit.lang.ArchRule;
 import java.time.Clock;
 import java.time.Instant;
-import java.util.Arrays;
 import java.util.Date;
 import java.util.List;
 import java.util.Random;
@@ -173,20 +172,24 @@ class ArchitectureTest {
   }
 
   /** A library and the packages that may use it. */
-  private record Library(String packages, String... homes) {
+  private record Library(String packages, List<String> homes) {
+    Library(String packages, String... homes) {
+      this(packages, List.of(homes));
+    }
+
     ArchRule rule() {
       return noClasses()
           .that()
-          .resideOutsideOfPackages(homes)
+          .resideOutsideOfPackages(homes.toArray(String[]::new))
           .should()
           .dependOnClassesThat()
           .resideInAPackage(packages)
-          .as(packages + " is used only in " + Arrays.toString(homes));
+          .as(packages + " is used only in " + homes);
     }
 
     boolean isUsed() {
       return MAIN.stream()
-          .filter(it -> resideInAnyPackage(homes).test(it))
+          .filter(it -> resideInAnyPackage(homes.toArray(String[]::new)).test(it))
           .flatMap(it -> it.getDirectDependenciesFromSelf().stream())
           .anyMatch(d -> resideInAPackage(packages).test(d.getTargetClass()));
     }

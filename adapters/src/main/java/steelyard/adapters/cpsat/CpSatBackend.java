@@ -3,6 +3,7 @@ package steelyard.adapters.cpsat;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
+import java.util.Optional;
 import java.util.Properties;
 import java.util.Set;
 import steelyard.adapters.spi.Backend;
@@ -53,16 +54,29 @@ public final class CpSatBackend implements Backend {
   }
 
   @Override
+  public Optional<Refusal> load() {
+    try {
+      return NativeLibrary.load().map(Refusal::new);
+    } catch (LinkageError e) {
+      return Optional.of(unfit(e));
+    }
+  }
+
+  @Override
   public Lowered lower(Model model, SolveRequest request, Monitor monitor) {
     try {
       return CpSatLowering.of(model, request, monitor);
     } catch (LinkageError e) {
-      return new Refusal(
-          "cpsat needs ortools-java 9.15 on the class path, where version "
-              + version()
-              + " does not fit ("
-              + e
-              + "): add the library, or take another backend");
+      return unfit(e);
     }
+  }
+
+  private static Refusal unfit(LinkageError e) {
+    return new Refusal(
+        "cpsat needs ortools-java 9.15 on the class path, where version "
+            + version()
+            + " does not fit ("
+            + e
+            + "): add the library, or take another backend");
   }
 }

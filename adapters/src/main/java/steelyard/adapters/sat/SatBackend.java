@@ -1,6 +1,7 @@
 package steelyard.adapters.sat;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import steelyard.adapters.spi.Backend;
 import steelyard.adapters.spi.Description;
@@ -39,6 +40,9 @@ public final class SatBackend implements Backend {
           "no-simplification",
           "no-restarts");
 
+  private static final Refusal MISSING =
+      new Refusal("sat needs the library org.ow2.sat4j.core on the class path");
+
   @Override
   public Description describe() {
     return new Description(
@@ -67,6 +71,16 @@ public final class SatBackend implements Backend {
   }
 
   @Override
+  public Optional<Refusal> load() {
+    try {
+      SatSolver.loadLibrary();
+      return Optional.empty();
+    } catch (NoClassDefFoundError e) {
+      return Optional.of(MISSING);
+    }
+  }
+
+  @Override
   public Lowered lower(Model model, SolveRequest request, Monitor monitor) {
     if (request.threads() != 1) {
       return new Refusal("sat runs one thread, not " + request.threads());
@@ -74,7 +88,7 @@ public final class SatBackend implements Backend {
     try {
       return SatLowering.of(model, request, monitor);
     } catch (NoClassDefFoundError e) {
-      return new Refusal("sat needs the library org.ow2.sat4j.core on the class path");
+      return MISSING;
     }
   }
 }

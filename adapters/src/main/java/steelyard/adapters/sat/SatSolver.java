@@ -55,6 +55,11 @@ final class SatSolver implements ClauseSink {
     }
   }
 
+  /** Loads the library's classes. */
+  static void loadLibrary() {
+    SolverFactory.newGlucose21().reset();
+  }
+
   private static ISolver solver(String configuration) {
     return switch (configuration) {
       case "glucose21" -> SolverFactory.newGlucose21();

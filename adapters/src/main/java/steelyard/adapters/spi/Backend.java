@@ -1,5 +1,6 @@
 package steelyard.adapters.spi;
 
+import java.util.Optional;
 import steelyard.variants.model.Model;
 
 /**
@@ -9,6 +10,15 @@ import steelyard.variants.model.Model;
  */
 public interface Backend {
   Description describe();
+
+  /**
+   * Loads the solver library, natives included, so that it costs none of the limit.
+   *
+   * @return why it cannot be used, if it cannot
+   */
+  default Optional<Refusal> load() {
+    return Optional.empty();
+  }
 
   /**
    * Makes of {@code model} what the solver reads. Lowers {@link Model#lowered()} only.

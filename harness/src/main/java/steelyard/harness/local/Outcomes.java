@@ -99,8 +99,12 @@ final class Outcomes {
     if (claim.isPresent()) {
       return new Ended(ending(claim.get().ended()), claim.get().reason());
     }
-    boolean late = reading.first(Event.Result.class).isPresent();
-    if (late) {
+    Optional<SolveOutcome> late =
+        end.last(Event.Result.class).map(Event.Result::outcome);
+    if (late.isPresent() && late.get().ended() != SolveOutcome.Why.EXHAUSTED) {
+      return new Ended(ending(late.get().ended()), late.get().reason());
+    }
+    if (late.isPresent()) {
       return new Ended(Ending.TIME_LIMIT, "answered after the limit");
     }
     return end.exit().reason().map(this::cut).orElseGet(this::died);

@@ -6,6 +6,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.function.Supplier;
@@ -92,6 +93,10 @@ final class Run {
     events.phase(Phases.LOAD);
     Backend backend = Registry.backend(order.backend());
     Settings settings = settings(backend.describe());
+    Optional<Refusal> missing = guarded(backend::load);
+    if (missing.isPresent()) {
+      throw new WorkerException(Event.Failure.Kind.UNSUPPORTED, missing.get().reason());
+    }
     Subject.OfVariant subject = (Subject.OfVariant) order.subject();
     Built<?> built = Built.read(subject);
     events.phase(Phases.BUILD);

@@ -1,11 +1,12 @@
 package steelyard.adapters.plantedtoo;
 
+import java.util.List;
 import com.google.ortools.sat.CpModel;
 import steelyard.adapters.planted.One;
 
 /** Knows another adapter, and is known by it: a cycle. */
 public final class Other {
-  public static final Class<?>[] KNOWN = {One.class, CpModel.class};
+  static final List<Class<?>> KNOWN = List.of(One.class, CpModel.class);
 
   private Other() {}
 }
