@@ -99,8 +99,7 @@ final class Outcomes {
     if (claim.isPresent()) {
       return new Ended(ending(claim.get().ended()), claim.get().reason());
     }
-    Optional<SolveOutcome> late =
-        end.last(Event.Result.class).map(Event.Result::outcome);
+    Optional<SolveOutcome> late = end.last(Event.Result.class).map(Event.Result::outcome);
     if (late.isPresent() && late.get().ended() != SolveOutcome.Why.EXHAUSTED) {
       return new Ended(ending(late.get().ended()), late.get().reason());
     }

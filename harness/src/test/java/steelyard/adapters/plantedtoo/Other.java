@@ -1,7 +1,7 @@
 package steelyard.adapters.plantedtoo;
 
-import java.util.List;
 import com.google.ortools.sat.CpModel;
+import java.util.List;
 import steelyard.adapters.planted.One;
 
 /** Knows another adapter, and is known by it: a cycle. */
