@@ -134,6 +134,7 @@ final class SatLowering implements Lowering {
   @Override
   public void close() {
     stop.set(true);
+    loaded.ifPresent(l -> l.solver().close());
   }
 
   private final class Dimacs implements Printable {

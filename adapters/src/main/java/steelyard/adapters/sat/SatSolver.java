@@ -26,12 +26,17 @@ final class SatSolver implements ClauseSink {
   enum Answer {
     YES,
     NO,
+    OUT_OF_BUDGET,
     STOPPED,
     OUT_OF_WORK
   }
 
+  static final int NO_ASSUMPTION = 0;
+  static final long NO_BUDGET = Long.MAX_VALUE;
+
   private final ISolver solver;
   private final VecInt clause = new VecInt();
+  private final Watch watch;
   private final boolean[] truth;
   private boolean contradicted;
 
@@ -45,9 +50,9 @@ final class SatSolver implements ClauseSink {
    */
   SatSolver(String configuration, int variables, AtomicBoolean stop, long conflicts) {
     solver = solver(configuration);
-    solver.setTimeoutOnConflicts(Integer.MAX_VALUE);
+    watch = new Watch(solver, stop, conflicts);
     solver.setKeepSolverHot(true);
-    solver.setSearchListener(new Watch(stop, conflicts));
+    solver.setSearchListener(watch);
     truth = new boolean[variables + 1];
     solver.newVar(variables);
     for (int v = 1; v <= variables; v++) {
@@ -91,20 +96,30 @@ final class SatSolver implements ClauseSink {
     }
   }
 
-  /** Searches for a solution of the clauses so far. */
-  Answer search() {
+  /**
+   * Searches for a solution of the clauses so far.
+   *
+   * @param assumption a literal that must hold in it, or {@link #NO_ASSUMPTION}
+   * @param budget how many conflicts it may meet, at least 1
+   */
+  Answer search(int assumption, long budget) {
     if (contradicted) {
       return Answer.NO;
     }
+    VecInt assumptions = new VecInt();
+    if (assumption != NO_ASSUMPTION) {
+      assumptions.push(assumption);
+    }
+    watch.start(budget, assumptions.size());
     try {
-      if (!solver.isSatisfiable(true)) {
-        contradicted = true;
+      if (!solver.isSatisfiable(assumptions, true)) {
+        contradicted = assumption == NO_ASSUMPTION;
         return Answer.NO;
       }
     } catch (Unwound e) {
       return e.answer;
     } catch (TimeoutException e) {
-      throw new IllegalStateException("the solver gave up without a limit", e);
+      return Answer.OUT_OF_BUDGET;
     }
     for (int literal : solver.model()) {
       truth[Math.abs(literal)] = literal > 0;
@@ -129,6 +144,11 @@ final class SatSolver implements ClauseSink {
     return counters;
   }
 
+  /** Ends the thread that the library keeps for its timer. */
+  void close() {
+    solver.expireTimeout();
+  }
+
   /** Leaves the library's search from one of its calls. */
   private static final class Unwound extends RuntimeException {
     private static final long serialVersionUID = 1L;
@@ -144,12 +164,22 @@ final class SatSolver implements ClauseSink {
   private static final class Watch extends SearchListenerAdapter<ISolverService> {
     private static final long serialVersionUID = 1L;
 
+    private final transient ISolver solver;
     private final transient AtomicBoolean stop;
     private long conflictsLeft;
+    private long budgetLeft;
+    private int lastLevel;
 
-    Watch(AtomicBoolean stop, long conflicts) {
+    Watch(ISolver solver, AtomicBoolean stop, long conflicts) {
+      this.solver = solver;
       this.stop = stop;
       this.conflictsLeft = conflicts;
+    }
+
+    /** A search with so many assumptions, each a level, begins. */
+    void start(long budget, int assumptions) {
+      budgetLeft = budget;
+      lastLevel = assumptions;
     }
 
     @Override
@@ -159,12 +189,19 @@ final class SatSolver implements ClauseSink {
       }
     }
 
-    /** A conflict at level 0 is the answer; it is not taken away. */
+    /** A conflict on the assumptions alone is the answer; it is not taken away. */
     @Override
     public void conflictFound(IConstr conflict, int level, int trailLevel) {
       conflictsLeft--;
-      if (conflictsLeft <= 0 && level > 0) {
+      budgetLeft--;
+      if (level <= lastLevel) {
+        return;
+      }
+      if (conflictsLeft <= 0) {
         throw new Unwound(Answer.OUT_OF_WORK);
+      }
+      if (budgetLeft <= 0) {
+        solver.expireTimeout();
       }
     }
   }

@@ -17,6 +17,9 @@ import steelyard.variants.model.Model;
 
 /** Answers one goal by one solver call after another, each with more clauses. */
 final class Search {
+  /** Conflicts after which a large step is given up; common practice, not tuned. */
+  private static final long STEP_BUDGET = 1_000;
+
   private final Model model;
   private final Integers integers;
   private final Optional<ObjectiveBound> objective;
@@ -43,29 +46,64 @@ final class Search {
   }
 
   private SolveOutcome satisfy() {
-    Answer answer = solver.search();
+    Answer answer = search();
     if (answer == Answer.YES) {
       report();
     }
     return outcome(answer == Answer.YES, answer, OptionalLong.empty());
   }
 
-  /** Asks for something better until there is nothing. */
+  /**
+   * Asks for something better until there is nothing. How much better doubles while it is found, so
+   * that easy progress is not made in small steps. A step that is refuted proves a bound; from then
+   * on the gap is halved. A step that takes too long is given up for the smallest.
+   */
   private SolveOutcome optimise(ObjectiveBound bound) {
-    monitor.bound(bound.atBest());
-    OptionalLong best = OptionalLong.empty();
-    Answer answer = solver.search();
-    while (answer == Answer.YES) {
-      report();
-      best = OptionalLong.of(model.objective().orElseThrow().sum().value(this::value));
-      bound.requireBetterThan(best.getAsLong());
-      answer = solver.search();
+    long low = 0;
+    monitor.bound(bound.value(low));
+    Answer answer = search();
+    if (answer != Answer.YES) {
+      return outcome(false, answer, OptionalLong.of(bound.value(low)));
     }
-    if (answer == Answer.NO && best.isPresent()) {
-      monitor.bound(best.getAsLong());
-      return SolveOutcome.of(Status.OPTIMAL, best, Why.EXHAUSTED);
+    long high = improved(bound);
+    long step = 1;
+    boolean halves = false;
+    while (low < high) {
+      long target = bound.hasLiterals() ? Math.max(low, high - step) : high - 1;
+      boolean isSmallest = target == high - 1;
+      answer = isSmallest ? search() : solver.search(bound.atMost(target), STEP_BUDGET);
+      switch (answer) {
+        case YES -> high = improved(bound);
+        case NO -> {
+          low = target + 1;
+          monitor.bound(bound.value(low));
+          halves = true;
+          if (!isSmallest) {
+            bound.learnAtLeast(low);
+          }
+        }
+        case OUT_OF_BUDGET -> halves = false;
+        case STOPPED, OUT_OF_WORK -> {
+          return outcome(true, answer, OptionalLong.of(bound.value(low)));
+        }
+      }
+      long wider = answer == Answer.OUT_OF_BUDGET ? 1 : 2 * step;
+      step = Math.max(1, Math.min(wider, halves ? (high - low) / 2 : high - low));
     }
-    return outcome(best.isPresent(), answer, OptionalLong.of(bound.atBest()));
+    OptionalLong best = OptionalLong.of(bound.value(high));
+    return SolveOutcome.of(Status.OPTIMAL, best, Why.EXHAUSTED);
+  }
+
+  /** Reports what was found and asks for better from now on; what it costs. */
+  private long improved(ObjectiveBound bound) {
+    report();
+    long cost = bound.cost(model.objective().orElseThrow().sum().value(this::value));
+    bound.requireAtMost(cost - 1);
+    return cost;
+  }
+
+  private Answer search() {
+    return solver.search(SatSolver.NO_ASSUMPTION, SatSolver.NO_BUDGET);
   }
 
   /** Forbids each projected solution before asking for the next. */
@@ -83,7 +121,7 @@ final class Search {
     long found = 0;
     Answer answer = Answer.YES;
     while (found < atMost && answer == Answer.YES) {
-      answer = solver.search();
+      answer = search();
       if (answer == Answer.YES) {
         found++;
         report();
@@ -123,6 +161,7 @@ final class Search {
     Why why =
         switch (last) {
           case YES, NO -> Why.EXHAUSTED;
+          case OUT_OF_BUDGET -> throw new IllegalStateException("a search without budget ran out");
           case OUT_OF_WORK -> Why.WORK;
           case STOPPED -> stopped(deadline);
         };

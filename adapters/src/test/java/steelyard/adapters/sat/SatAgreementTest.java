@@ -16,6 +16,7 @@ import org.junit.jupiter.params.provider.FieldSource;
 import steelyard.adapters.spi.AllAssignments;
 import steelyard.adapters.spi.Goal;
 import steelyard.adapters.spi.RandomRelations;
+import steelyard.adapters.spi.SmallModels;
 import steelyard.adapters.spi.SolveOutcome;
 import steelyard.adapters.spi.Status;
 import steelyard.variants.model.Atom;
@@ -75,7 +76,7 @@ class SatAgreementTest {
         asserted.add(made.relation(RandomRelations.KINDS.get((int) kind)));
       }
       Objective objective = objective(seed);
-      Model model = Solved.model(made.domains(), asserted, Optional.of(objective));
+      Model model = SmallModels.of(made.domains(), asserted, Optional.of(objective));
       Solved solved = Solved.of(model, new Goal.Optimise(), seed % 2 == 0 ? DIAGRAMS : BINARY);
       OptionalLong best = best(objective, solutions(made.domains(), asserted));
       assertThat(solved.outcome)
@@ -123,7 +124,7 @@ class SatAgreementTest {
 
   private static void assertEnumerates(
       List<Domain> domains, List<? extends Constraint> asserted, Map<String, String> settings) {
-    Model model = Solved.model(domains, asserted, Optional.empty());
+    Model model = SmallModels.of(domains, asserted);
     Solved solved = Solved.of(model, Solved.all(model), settings);
     List<Ints> expected = solutions(domains, asserted);
     assertThat(solved.solutions)

@@ -5,11 +5,9 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.function.Consumer;
-import java.util.stream.IntStream;
 import steelyard.adapters.spi.Deadline;
 import steelyard.adapters.spi.Goal;
 import steelyard.adapters.spi.Lowered;
@@ -19,18 +17,9 @@ import steelyard.adapters.spi.Settings;
 import steelyard.adapters.spi.Sizes;
 import steelyard.adapters.spi.SolveOutcome;
 import steelyard.adapters.spi.SolveRequest;
-import steelyard.variants.model.Branching;
-import steelyard.variants.model.Constraint;
-import steelyard.variants.model.Domain;
-import steelyard.variants.model.Formula;
-import steelyard.variants.model.Hint;
 import steelyard.variants.model.Ints;
 import steelyard.variants.model.Longs;
 import steelyard.variants.model.Model;
-import steelyard.variants.model.Objective;
-import steelyard.variants.model.Origin;
-import steelyard.variants.model.Posting;
-import steelyard.variants.model.Variables;
 
 /** A model solved by the backend, and all that it told on the way. */
 final class Solved implements Monitor {
@@ -82,28 +71,6 @@ final class Solved implements Monitor {
   /** Every solution, each once as seen on the decisions. */
   static Goal all(Model model) {
     return new Goal.Enumerate(model.variables().decisions(), Long.MAX_VALUE);
-  }
-
-  /** A model of decisions x0, x1, ... and postings as adapters see them. */
-  static Model model(
-      List<Domain> domains, List<? extends Constraint> asserted, Optional<Objective> objective) {
-    List<Variables.Variable> variables =
-        IntStream.range(0, domains.size())
-            .mapToObj(v -> new Variables.Variable("x" + v, domains.get(v), Variables.Kind.DECISION))
-            .toList();
-    List<Posting> postings = new ArrayList<>();
-    for (Constraint constraint : asserted) {
-      int id = postings.size();
-      postings.add(
-          new Posting(
-              id,
-              new Origin(Origin.PLAIN, "asserted", id),
-              Posting.Duty.ASSERTED,
-              Formula.all(),
-              List.of(),
-              List.of(constraint)));
-    }
-    return Model.of(Variables.of(variables), postings, objective, Branching.NONE, Hint.NONE);
   }
 
   @Override

@@ -2,6 +2,7 @@ package steelyard.adapters.sat.encoding;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.SortedMap;
 import java.util.SortedSet;
 import java.util.TreeMap;
@@ -24,8 +25,8 @@ import steelyard.variants.model.Relation;
 import steelyard.variants.model.Variables;
 
 /**
- * Writes a model as clauses: its variables within their {@link RootBounds}, then posting by posting
- * what is lowered, then its objective.
+ * Writes a model as clauses: its variables within their {@link RootDomains}, then posting by
+ * posting what is lowered, then its objective.
  */
 public final class ModelEncoder {
   private final Model model;
@@ -57,7 +58,7 @@ public final class ModelEncoder {
     this.integers = new Integers(cnf);
     this.linear = new LinearEncoder(cnf, integers, mostEdges);
     this.relations = new RelationEncoder(cnf, integers, linear);
-    Optional<List<Domain>> bounded = RootBounds.domains(model);
+    Optional<List<Domain>> bounded = RootDomains.of(model);
     this.isRefuted = bounded.isEmpty();
     this.fresh = isRefuted ? Fresh.beside(model.variables()) : Fresh.beside(bounded.get());
     this.byPosting = new long[model.postings().size()];
@@ -133,10 +134,9 @@ public final class ModelEncoder {
       encode(conditional);
     } else {
       Relation relation = (Relation) constraint;
-      Optional<String> name = relation.accept(relations);
-      if (name.isPresent()) {
-        used(relation, name.get());
-      } else {
+      Optional<Set<String>> names = relation.accept(relations);
+      names.ifPresent(all -> all.forEach(name -> used(relation, name)));
+      if (names.isEmpty()) {
         Truth truth = Decomposition.of(relation, fresh);
         used(relation, truth.how());
         encode(truth.definitions(), truth.holds());

@@ -49,19 +49,38 @@ public final class ObjectiveBound {
             : Optional.of(new BinarySum(cnf, terms));
   }
 
-  /** What the domains of its variables say the objective is not better than. */
-  public long atBest() {
-    return sign * least;
+  /** What {@code value} costs: 0 is what domains allow at best. */
+  public long cost(long value) {
+    return sign * value - least;
   }
 
-  /** From now on the objective is better than {@code value}. */
-  public void requireBetterThan(long value) {
-    long most = sign * value - least - 1;
-    if (most < 0) {
+  /** The objective's value at {@code cost}. */
+  public long value(long cost) {
+    return sign * (cost + least);
+  }
+
+  /** From now on the objective costs at most {@code cost}. */
+  public void requireAtMost(long cost) {
+    if (cost < 0) {
       cnf.end();
     } else {
-      values.ifPresent(ladder -> cnf.clause(ladder.atMost(most)));
-      number.ifPresent(sum -> sum.atMost(most, Cnf.TRUE));
+      values.ifPresent(ladder -> cnf.clause(ladder.atMost(cost)));
+      number.ifPresent(sum -> sum.atMost(cost, Cnf.TRUE));
     }
+  }
+
+  /** Whether there is a literal for each cost. */
+  public boolean hasLiterals() {
+    return values.isPresent();
+  }
+
+  /** The literal that says the objective costs at most {@code cost}, which is not negative. */
+  public int atMost(long cost) {
+    return values.orElseThrow().atMost(cost);
+  }
+
+  /** It is known that the objective costs at least {@code cost}, more than 0. */
+  public void learnAtLeast(long cost) {
+    cnf.clause(-atMost(cost - 1));
   }
 }

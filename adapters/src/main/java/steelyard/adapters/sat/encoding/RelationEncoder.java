@@ -1,6 +1,7 @@
 package steelyard.adapters.sat.encoding;
 
 import java.util.Optional;
+import java.util.Set;
 import steelyard.variants.model.AllDifferent;
 import steelyard.variants.model.BinPacking;
 import steelyard.variants.model.Clause;
@@ -13,10 +14,10 @@ import steelyard.variants.model.RelationVisitor;
 import steelyard.variants.model.Table;
 
 /**
- * Writes a posted relation and answers with the encoding's name; empty, and nothing written, where
- * the shared decomposition is better.
+ * Writes a posted relation and answers with the names of the encodings used; empty, and nothing
+ * written, where the shared decomposition is better.
  */
-final class RelationEncoder implements RelationVisitor<Optional<String>> {
+final class RelationEncoder implements RelationVisitor<Optional<Set<String>>> {
   /** How a clause is encoded. */
   static final String ITSELF = "itself, over order literals";
 
@@ -39,59 +40,59 @@ final class RelationEncoder implements RelationVisitor<Optional<String>> {
   }
 
   @Override
-  public Optional<String> linear(Linear relation) {
+  public Optional<Set<String>> linear(Linear relation) {
     linear.encode(relation, Cnf.TRUE);
-    return Optional.of(String.join("; ", linear.used()));
+    return Optional.of(linear.used());
   }
 
   @Override
-  public Optional<String> clause(Clause relation) {
+  public Optional<Set<String>> clause(Clause relation) {
     anyOf(relation).end();
-    return Optional.of(ITSELF);
+    return Optional.of(Set.of(ITSELF));
   }
 
   @Override
-  public Optional<String> allDifferent(AllDifferent relation) {
+  public Optional<Set<String>> allDifferent(AllDifferent relation) {
     new AllDifferentEncoder(cnf, integers).encode(relation);
-    return Optional.of(AllDifferentEncoder.NAME);
+    return Optional.of(Set.of(AllDifferentEncoder.NAME));
   }
 
   @Override
-  public Optional<String> element(Element relation) {
+  public Optional<Set<String>> element(Element relation) {
     new ElementEncoder(cnf, integers, linear).encode(relation);
-    return Optional.of(ElementEncoder.NAME);
+    return Optional.of(Set.of(ElementEncoder.NAME));
   }
 
   @Override
-  public Optional<String> table(Table relation) {
-    return Optional.of(new TableEncoder(cnf, integers).encode(relation));
+  public Optional<Set<String>> table(Table relation) {
+    return Optional.of(Set.of(new TableEncoder(cnf, integers).encode(relation)));
   }
 
   @Override
-  public Optional<String> maximum(Maximum relation) {
+  public Optional<Set<String>> maximum(Maximum relation) {
     new MaximumEncoder(cnf, integers, linear).encode(relation);
-    return Optional.of(MaximumEncoder.NAME);
+    return Optional.of(Set.of(MaximumEncoder.NAME));
   }
 
   @Override
-  public Optional<String> noOverlap(NoOverlap relation) {
+  public Optional<Set<String>> noOverlap(NoOverlap relation) {
     new NoOverlapEncoder(cnf, integers, linear).encode(relation);
-    return Optional.of(NoOverlapEncoder.NAME);
+    return Optional.of(Set.of(NoOverlapEncoder.NAME));
   }
 
   @Override
-  public Optional<String> cumulative(Cumulative relation) {
+  public Optional<Set<String>> cumulative(Cumulative relation) {
     CumulativeEncoder encoder = new CumulativeEncoder(cnf, integers, linear);
     if (!encoder.suits(relation)) {
       return Optional.empty();
     }
     encoder.encode(relation);
-    return Optional.of(CumulativeEncoder.NAME);
+    return Optional.of(Set.of(CumulativeEncoder.NAME));
   }
 
   @Override
-  public Optional<String> binPacking(BinPacking relation) {
+  public Optional<Set<String>> binPacking(BinPacking relation) {
     new BinPackingEncoder(cnf, integers, linear).encode(relation);
-    return Optional.of(BinPackingEncoder.NAME);
+    return Optional.of(Set.of(BinPackingEncoder.NAME));
   }
 }

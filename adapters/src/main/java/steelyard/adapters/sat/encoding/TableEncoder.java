@@ -6,7 +6,8 @@ import steelyard.variants.model.Tuples;
 /**
  * Forbidden rows are a clause each. An allowed row has a literal, which implies the row's values;
  * each value needs a row that has it, which makes unit propagation domain consistent: Bacchus
- * (2007), "GAC via Unit Propagation", CP, LNCS 4741:133-147.
+ * (2007), "GAC via Unit Propagation", CP, LNCS 4741:133-147. Values that only short rows allow are
+ * supported by intervals, which is weaker.
  */
 final class TableEncoder {
   static final String ALLOWED = "literal per row, support per value (Bacchus 2007)";
