@@ -31,7 +31,7 @@ import steelyard.variants.model.judge.Evaluator.Judgement;
 class BackendAnswersTest {
   private static final String SERVICE = "META-INF/services/" + Backend.class.getName();
 
-  /** Nobody needs it; who does has not answered. */
+  /** A safety net: no answer here takes nearly as long. */
   private static final long SECONDS = 60;
 
   private static List<Backend> backends() {

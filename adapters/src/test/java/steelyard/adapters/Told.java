@@ -7,6 +7,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.Timer;
+import java.util.TimerTask;
 import steelyard.adapters.spi.Backend;
 import steelyard.adapters.spi.Deadline;
 import steelyard.adapters.spi.Goal;
@@ -32,6 +34,8 @@ import steelyard.variants.model.judge.Evaluator.Judgement;
  * @param bounds in the order in which they came
  */
 record Told(SolveOutcome outcome, List<Judgement> solutions, List<Long> bounds) {
+  private static final long WAKE_EVERY = 50; // milliseconds, as Deadline promises
+
   Told {
     solutions = List.copyOf(solutions);
     bounds = List.copyOf(bounds);
@@ -41,14 +45,19 @@ record Told(SolveOutcome outcome, List<Judgement> solutions, List<Long> bounds) 
   static Told by(Backend backend, Model model, Goal goal, long seed, long seconds) {
     Seeding seeding = Seeding.of(model, seed);
     Settings settings = Settings.of(backend.describe(), Map.of());
-    SolveRequest request = new SolveRequest(settings, seed, 1, new Wall(seconds));
+    Wall wall = new Wall(seconds);
+    SolveRequest request = new SolveRequest(settings, seed, 1, wall);
     Ear ear = new Ear(model);
     Monitor monitor = seeding.monitor(ear);
     Lowered lowered = backend.lower(seeding.model(), request, monitor);
     assertThat(lowered).isNotInstanceOf(Refusal.class);
+    Timer timer = new Timer("wall limit", true);
     try (Lowering lowering = (Lowering) lowered) {
+      timer.schedule(wall.waking(), WAKE_EVERY, WAKE_EVERY);
       SolveOutcome outcome = lowering.solve(seeding.goal(goal), monitor);
       return new Told(outcome, ear.solutions, ear.bounds);
+    } finally {
+      timer.cancel();
     }
   }
 
@@ -88,9 +97,10 @@ record Told(SolveOutcome outcome, List<Judgement> solutions, List<Long> bounds) 
     public void blame(String measure, Longs byPosting) {}
   }
 
-  /** A wall limit that nothing here should reach: who does has not answered. */
+  /** A wall limit; wakes a blocking solver when it has passed. */
   private static final class Wall implements Deadline {
     private final long end;
+    private volatile Runnable wake = () -> {};
 
     Wall(long seconds) {
       end = System.nanoTime() + seconds * 1_000_000_000;
@@ -112,6 +122,19 @@ record Told(SolveOutcome outcome, List<Judgement> solutions, List<Long> bounds) 
     }
 
     @Override
-    public void onStop(Runnable wake) {}
+    public void onStop(Runnable wake) {
+      this.wake = wake;
+    }
+
+    TimerTask waking() {
+      return new TimerTask() {
+        @Override
+        public void run() {
+          if (stopAsked()) {
+            wake.run();
+          }
+        }
+      };
+    }
   }
 }
