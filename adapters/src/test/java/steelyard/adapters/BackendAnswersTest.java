@@ -40,7 +40,7 @@ class BackendAnswersTest {
     return backends;
   }
 
-  /** Each row once for each backend, which comes first and in front of it its name. */
+  /** Each row once for each backend, which comes before it and is shown by its name. */
   private static Stream<Arguments> onEach(Object[]... rows) {
     return backends().stream()
         .flatMap(
@@ -89,9 +89,10 @@ class BackendAnswersTest {
   }
 
   /**
-   * Shortest makespans of ft06 (Fisher and Thompson 1963), la01 and la05 (Lawrence 1984) as proved
-   * in Applegate and Cook (1991), ORSA Journal on Computing 3(2):149-156, among others; of the two
-   * made-up ones by trying every order of the moulds at every station.
+   * Shortest makespans of ft06 (Fisher and Thompson 1963), la01 and la05 (Lawrence 1984) as listed
+   * by Applegate and Cook (1991), ORSA Journal on Computing 3(2):149-156 (cited from memory), and
+   * in later tables of best known bounds; of the two made-up ones by trying every order of the
+   * moulds at every station.
    */
   @ParameterizedTest
   @MethodSource("shops")

@@ -39,11 +39,6 @@ record Workshop(int stations, List<Mould> moulds) {
     return moulds.get(index);
   }
 
-  /** Minutes of all operations together: one after the other, everything is done by then. */
-  int totalMinutes() {
-    return moulds.stream().flatMap(m -> m.route().stream()).mapToInt(Operation::minutes).sum();
-  }
-
   /** The operations that hold {@code station}, by mould and step. */
   List<Visit> visits(int station) {
     List<Visit> visits = new ArrayList<>();
