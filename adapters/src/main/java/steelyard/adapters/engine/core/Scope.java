@@ -154,4 +154,14 @@ public final class Scope {
   public long ne(int i, int v) {
     return Atom.ne(handle[i], v - offset[i]);
   }
+
+  /** The v for which {@code atom} is {@link #ge ge(i, v)}. */
+  public int lower(int i, long atom) {
+    return Atom.value(atom) + offset[i];
+  }
+
+  /** The v for which {@code atom} is {@link #le le(i, v)}. */
+  public int upper(int i, long atom) {
+    return offset[i] - Atom.value(atom);
+  }
 }

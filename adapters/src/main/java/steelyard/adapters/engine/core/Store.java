@@ -27,6 +27,8 @@ public final class Store {
   static final int CLAUSE = -3;
   static final int ARC = -4;
 
+  private static final int NO_END = -1;
+
   /** The index of the propagator that is running, or one of the makers above. */
   int running = DECISION;
 
@@ -178,19 +180,30 @@ public final class Store {
     return setMin(h, v, why) && setMin(h ^ 1, -v, why);
   }
 
-  /** Requires {@code h ≠ v}. */
+  /**
+   * Requires {@code h ≠ v}. With learning, a value at an end of the domain goes as a hole first, so
+   * that its reason is kept, and the bound that moves on is the store's own change.
+   */
   public boolean remove(int h, int v, int why) {
     if (v < lo[h] || v > -lo[h ^ 1]) {
       return true;
     }
-    if (v == lo[h]) {
-      return v == -lo[h ^ 1] ? fail(Atom.ne(h, v), why) : setMin(h, v + 1, why);
+    if (fixed(h)) {
+      return fail(Atom.ne(h, v), why);
     }
-    if (v == -lo[h ^ 1]) {
-      return setMin(h ^ 1, 1 - v, why);
+    int end = v == lo[h] ? h : v == -lo[h ^ 1] ? h ^ 1 : NO_END;
+    if (end != NO_END && !trail.learning) {
+      return setMin(end, lo[end] + 1, why);
     }
-    int x = h >> 1;
-    int value = (h & 1) == 0 ? v : -v;
+    pierce(h >> 1, (h & 1) == 0 ? v : -v, why);
+    if (end != NO_END) {
+      skipHoles(end, lo[end]);
+      agenda.raised(end, fixed(end));
+    }
+    return true;
+  }
+
+  private void pierce(int x, int value, int why) {
     if (!holes.has(x, value)) {
       holes.add(x, value, trail.top);
       int t = trail.add(~x, value);
@@ -200,7 +213,6 @@ public final class Store {
       }
       agenda.pierced(x);
     }
-    return true;
   }
 
   /** Requires the atom. */

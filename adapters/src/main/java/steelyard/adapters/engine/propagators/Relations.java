@@ -4,6 +4,7 @@ import java.util.Arrays;
 import steelyard.adapters.engine.core.Atom;
 import steelyard.adapters.engine.core.Decidable;
 import steelyard.adapters.engine.core.Network;
+import steelyard.adapters.engine.core.Scope;
 import steelyard.adapters.engine.core.Store;
 
 /**
@@ -112,6 +113,42 @@ public final class Relations {
     return sum.min(store) <= value
         && sum.max(store) >= value
         && (divisor == 0 || (value - sum.constant()) % divisor == 0);
+  }
+
+  /** {@code when ⇒} the rows are pairwise different, to the given level. */
+  public void allDifferent(int tag, long when, Scope x, Level level) {
+    if (x.size() < 2) {
+      return;
+    }
+    if (store.truth(when) > 0) {
+      network.post(new AllDifferentValues(x), tag);
+    }
+    post(
+        tag,
+        when,
+        level == Level.DOMAIN && AllDifferentDomain.fits(store, x)
+            ? new AllDifferentDomain(store, x)
+            : new AllDifferentBounds(x));
+  }
+
+  /**
+   * {@code when ⇒} the rows take one of the tuples, given one after the other; they {@link
+   * Table#fits fit}.
+   */
+  public void allowed(int tag, long when, Scope x, int[] tuples) {
+    post(tag, when, new Table(store, x, tuples));
+  }
+
+  /** {@code when ⇒} the rows take none of the tuples, given one after the other. */
+  public void forbidden(int tag, long when, Scope x, int[] tuples) {
+    int n = x.size();
+    for (int t = 0; t < tuples.length; t += n) {
+      long[] atoms = new long[n];
+      for (int i = 0; i < n; i++) {
+        atoms[i] = tuples[t + i] == Table.ANY ? Atom.FALSE : x.ne(i, tuples[t + i]);
+      }
+      clause(tag, when, atoms);
+    }
   }
 
   /** {@code when ⇒ body}. */

@@ -75,7 +75,7 @@ public final class Automatic implements Brancher {
         return towards(s, h, value);
       }
     }
-    return s.size(h) <= WIDE ? Atom.le(h, s.min(h)) : ValueOrder.SPLIT_LOW.decide(s, h);
+    return s.size(h) <= WIDE ? Atom.le(h, s.min(h)) : ValueOrder.LOWER_HALF.decide(s, h);
   }
 
   private static long towards(Store s, int h, int value) {

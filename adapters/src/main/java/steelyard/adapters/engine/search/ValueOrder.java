@@ -35,14 +35,14 @@ public enum ValueOrder {
     }
   },
   /** The lower half of the range, then the upper. */
-  SPLIT_LOW {
+  LOWER_HALF {
     @Override
     long decide(Store s, int h) {
       return Atom.le(h, middle(s, h));
     }
   },
   /** The upper half of the range, then the lower. */
-  SPLIT_HIGH {
+  UPPER_HALF {
     @Override
     long decide(Store s, int h) {
       return Atom.ge(h, middle(s, h) + 1);

@@ -16,6 +16,8 @@ import steelyard.adapters.engine.core.Store;
  * @param poster posts {@code when ⇒ relation}
  * @param body the relation as a propagator of its own, if it has one, for its verdict
  * @param level what the first fixpoint reaches
+ * @param given what holds beside the relation, whether that is imposed or not
+ * @param givenPoster posts what is given
  */
 record Subject(
     String name,
@@ -23,7 +25,30 @@ record Subject(
     Predicate<int[]> holds,
     Poster poster,
     Optional<BiFunction<Store, Scope, Decidable>> body,
-    Level level) {
+    Level level,
+    Predicate<int[]> given,
+    Poster givenPoster) {
+
+  /** A relation that stands alone. */
+  Subject(
+      String name,
+      Rows rows,
+      Predicate<int[]> holds,
+      Poster poster,
+      Optional<BiFunction<Store, Scope, Decidable>> body,
+      Level level) {
+    this(name, rows, holds, poster, body, level, values -> true, (r, s, x, when) -> {});
+  }
+
+  /** The same where something else always holds. */
+  Subject given(Predicate<int[]> always, Poster alwaysPoster) {
+    return new Subject(name, rows, holds, poster, body, level, always, alwaysPoster);
+  }
+
+  /** Whether the relation holds, and what always does. */
+  boolean isSolution(int[] values) {
+    return given.test(values) && holds.test(values);
+  }
 
   /** Posts {@code when ⇒ relation}. */
   interface Poster {

@@ -38,7 +38,7 @@ final class SubjectChecks {
   static void findsExactlyTheSolutions(Subject subject, long seed) {
     Bench bench = bench(subject, seed, false);
     subject.poster().post(bench.relations, bench.store, bench.scope, Atom.TRUE);
-    expectSolutions(bench, seed, false, subject.rows(), values -> subject.holds().test(values));
+    expectSolutions(bench, seed, false, subject.rows(), subject::isSolution);
   }
 
   /** With a flag, {@code flag ⇒ relation} has exactly the solutions it should have. */
@@ -48,7 +48,12 @@ final class SubjectChecks {
     int on = seed % 2 == 0 ? 1 : 0;
     subject.poster().post(bench.relations, bench.store, bench.scope, when);
     Rows rows = withFlag(subject.rows());
-    expectSolutions(bench, seed, true, rows, v -> v[v.length - 1] != on || holds(subject, v));
+    expectSolutions(
+        bench,
+        seed,
+        true,
+        rows,
+        v -> v[v.length - 1] != on ? given(subject, v) : holds(subject, v));
   }
 
   /** {@code relation ⇒ flag} has exactly the solutions it should have. */
@@ -60,11 +65,20 @@ final class SubjectChecks {
     bench.relations.entails(
         0, subject.body().get().apply(bench.store, bench.scope), Atom.ge(bench.flag, 1));
     Rows rows = withFlag(subject.rows());
-    expectSolutions(bench, seed, true, rows, v -> v[v.length - 1] == 1 || !holds(subject, v));
+    expectSolutions(
+        bench,
+        seed,
+        true,
+        rows,
+        v -> given(subject, v) && (v[v.length - 1] == 1 || !holds(subject, v)));
   }
 
   private static boolean holds(Subject subject, int[] valuesAndFlag) {
-    return subject.holds().test(Arrays.copyOf(valuesAndFlag, valuesAndFlag.length - 1));
+    return subject.isSolution(Arrays.copyOf(valuesAndFlag, valuesAndFlag.length - 1));
+  }
+
+  private static boolean given(Subject subject, int[] valuesAndFlag) {
+    return subject.given().test(Arrays.copyOf(valuesAndFlag, valuesAndFlag.length - 1));
   }
 
   private static Rows withFlag(Rows rows) {
@@ -72,7 +86,9 @@ final class SubjectChecks {
   }
 
   private static Bench bench(Subject subject, long seed, boolean learning) {
-    return new Bench(subject.rows(), new Random(seed), seed % 3 == 0, learning);
+    Bench bench = new Bench(subject.rows(), new Random(seed), seed % 3 == 0, learning);
+    subject.givenPoster().post(bench.relations, bench.store, bench.scope, Atom.TRUE);
+    return bench;
   }
 
   private static void expectSolutions(
@@ -99,7 +115,7 @@ final class SubjectChecks {
     Bench bench = bench(subject, seed, false);
     subject.poster().post(bench.relations, bench.store, bench.scope, Atom.TRUE);
     boolean consistent = bench.network.propagate();
-    List<Set<Integer>> wanted = subject.rows().supported(subject.holds());
+    List<Set<Integer>> wanted = subject.rows().supported(subject::isSolution);
     if (!consistent) {
       assertThat(wanted).allMatch(Set::isEmpty);
       return;
@@ -113,7 +129,7 @@ final class SubjectChecks {
       }
     }
     if (subject.level() == Subject.Level.BOUNDS) {
-      List<Set<Integer>> supported = domains.filled().supported(subject.holds());
+      List<Set<Integer>> supported = domains.filled().supported(subject::isSolution);
       for (int i = 0; i < domains.size(); i++) {
         assertThat(supported.get(i))
             .as("bounds of row %d", i)
@@ -178,7 +194,7 @@ final class SubjectChecks {
             .rows()
             .solutions(
                 values ->
-                    subject.holds().test(values)
+                    subject.isSolution(values)
                         && satisfiesAll(bench, out, values)
                         && !satisfies(bench, atom, values));
     assertThat(counterexamples).as("against the reason for %s", Atom.show(atom)).isEmpty();

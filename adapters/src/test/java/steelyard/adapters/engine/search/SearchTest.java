@@ -97,8 +97,8 @@ class SearchTest {
     assertThat(firstDecision(ValueOrder.MIN)).isEqualTo("[-x1 ≥ 0]");
     assertThat(firstDecision(ValueOrder.MAX)).isEqualTo("[x1 ≥ 9]");
     assertThat(firstDecision(ValueOrder.MEDIAN)).isEqualTo("[x1 = 4]");
-    assertThat(firstDecision(ValueOrder.SPLIT_LOW)).isEqualTo("[-x1 ≥ -4]");
-    assertThat(firstDecision(ValueOrder.SPLIT_HIGH)).isEqualTo("[x1 ≥ 5]");
+    assertThat(firstDecision(ValueOrder.LOWER_HALF)).isEqualTo("[-x1 ≥ -4]");
+    assertThat(firstDecision(ValueOrder.UPPER_HALF)).isEqualTo("[x1 ≥ 5]");
   }
 
   private static String firstDecision(ValueOrder values) {
