@@ -33,6 +33,13 @@ import steelyard.results.statistics.SolveTime;
  */
 public final class Scatter {
 
+  static {
+    // Before the first colour: the toolkit looks for a display once, and fails if it is a dead one.
+    if (System.getProperty("java.awt.headless") == null) {
+      System.setProperty("java.awt.headless", "true");
+    }
+  }
+
   /**
    * One pair of runs.
    *

@@ -3,13 +3,17 @@ package steelyard.results.brief.chart;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.concurrent.TimeUnit;
 import java.util.regex.MatchResult;
 import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import steelyard.results.brief.chart.Scatter.Dot;
 import steelyard.results.statistics.SolveTime;
 
@@ -111,5 +115,33 @@ class ScatterTest {
 
     assertThat(draw(dots)).isEqualTo(draw(dots));
     assertThat(draw(dots)).doesNotContain("http", "style=", "font", "rgb(", "clip");
+  }
+
+  @Test
+  void needsNoDisplay(@TempDir Path folder) throws Exception {
+    Path said = folder.resolve("said");
+    ProcessBuilder child =
+        new ProcessBuilder(
+            Path.of(System.getProperty("java.home"), "bin", "java").toString(),
+            "-cp",
+            System.getProperty("java.class.path"),
+            DrawsOne.class.getName());
+    child.environment().put("DISPLAY", ":4711");
+    child.redirectErrorStream(true).redirectOutput(said.toFile());
+
+    Process running = child.start();
+    boolean ended = running.waitFor(2, TimeUnit.MINUTES);
+    running.destroyForcibly();
+
+    assertThat(ended).isTrue();
+    assertThat(said).content(StandardCharsets.UTF_8).isEqualTo(draw(new Dot(s(1), s(2), 0)));
+  }
+
+  /** Draws a chart in a process of its own. */
+  static final class DrawsOne {
+    public static void main(String[] args) {
+      System.out.writeBytes(draw(new Dot(s(1), s(2), 0)).getBytes(StandardCharsets.UTF_8));
+      System.out.flush();
+    }
   }
 }
