@@ -74,7 +74,7 @@ final class Comparing {
         classes,
         grounds(matches),
         open(matches),
-        before.size() + after.size() - 2 * matches.size(),
+        after.size() - matches.size(),
         matches.stream().map(Comparing::point).toList());
   }
 

@@ -153,7 +153,7 @@ public record Facts(
    * @param classes per class of instances, also if there is only one
    * @param grounds what decided how many pairs of runs
    * @param open pairs of runs beyond the limit
-   * @param unpaired runs of either candidate that have no partner in their block yet
+   * @param unpaired runs of after that have no partner in their block yet
    * @param points every pair of runs
    */
   public record Pair(

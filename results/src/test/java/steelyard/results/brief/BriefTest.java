@@ -179,7 +179,7 @@ class BriefTest {
     Pair pair = twoOf(proved("A", "i1", 1).block(1), proved("B", "i1", 9).block(2)).pairs().get(0);
 
     assertThat(pair.points()).isEmpty();
-    assertThat(pair.unpaired()).isEqualTo(2);
+    assertThat(pair.unpaired()).isOne();
     assertThat(pair.total().penalisedAfter()).isEmpty();
   }
 
