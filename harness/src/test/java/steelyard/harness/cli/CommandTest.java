@@ -1,0 +1,184 @@
+package steelyard.harness.cli;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.io.StringWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.Arguments;
+import org.junit.jupiter.params.provider.MethodSource;
+import steelyard.results.ledger.Ledger;
+import steelyard.results.ledger.Observation;
+import steelyard.results.ledger.SweepSummary;
+
+/** The commands from what is typed to what is printed, with real workers. */
+class CommandTest {
+  private static final Path CARTS =
+      Path.of("src/test/resources/steelyard/harness/fixture/carts").toAbsolutePath();
+
+  @TempDir Path folder;
+
+  private record Result(int status, String out, String err) {}
+
+  private static Result run(String... args) {
+    StringWriter out = new StringWriter();
+    StringWriter err = new StringWriter();
+    int status =
+        Steelyard.commandLine(new PrintWriter(out, true), new PrintWriter(err, true)).execute(args);
+    return new Result(status, out.toString(), err.toString());
+  }
+
+  private Result sweep(String yaml) throws IOException {
+    Path file = folder.resolve("cart night.yaml");
+    Files.writeString(file, yaml);
+    return run("sweep", file.toString(), "--ledger", folder.resolve("a ledger").toString());
+  }
+
+  private static String carts(String variants, String instance) {
+    return """
+        name: carts
+        family: faulty-cart
+        variants: %s
+        backends: [sat]
+        instances: {folder: "%s", names: [%s]}
+        limits: {wall: 20 s, memory: 1 GB}
+        """
+        .formatted(variants, CARTS, instance);
+  }
+
+  @Test
+  void a_sweep_runs_is_judged_and_reported_and_is_not_run_again_while_unfinished()
+      throws IOException {
+    Result first = sweep(carts("[plain, plain+lightest-count]", "even"));
+    assertThat(first.err()).contains("models built");
+    assertThat(first.status()).as(first.err()).isEqualTo(ExitStatus.OK);
+    assertThat(first.out()).contains("plain on sat", "plain+lightest-count on sat", "The page:");
+    assertThat(first.out().lines()).allMatch(line -> line.length() <= 80 || line.contains("page"));
+    Path page = folder.resolve("a ledger/briefs/carts/brief.html");
+    assertThat(page).content().contains("plain+lightest-count on sat").doesNotContain("http://");
+
+    try (Ledger ledger = Ledger.read(folder.resolve("a ledger/runs.db"))) {
+      SweepSummary sweep = ledger.plans().sweeps().get(0);
+      List<Observation> seen = ledger.observations(sweep.id());
+      assertThat(sweep.runs()).isEqualTo(sweep.cells());
+      assertThat(seen).allMatch(Observation::proved);
+      Result again = run("rerun", seen.get(0).run(), "--ledger", ledgerFolder());
+      assertThat(again.status()).as(again.out()).isEqualTo(ExitStatus.OK);
+      assertThat(again.out()).contains("the same");
+      Result shown = run("show", seen.get(0).run().substring(0, 8), "--ledger", ledgerFolder());
+      assertThat(shown.out()).contains("outcome    OPTIMAL, COMPLETED", "check      VALID");
+    }
+    Result brief = run("brief", "carts", "--ledger", ledgerFolder());
+    assertThat(brief.status()).isEqualTo(ExitStatus.OK);
+  }
+
+  private String ledgerFolder() {
+    return folder.resolve("a ledger").toString();
+  }
+
+  @Test
+  void an_implied_amendment_that_is_wrong_is_found_by_the_claims_that_contradict_each_other()
+      throws IOException {
+    Result result = sweep(carts("[plain, plain+average-count]", "uneven"));
+    assertThat(result.status()).as(result.out()).isEqualTo(ExitStatus.FINDING);
+    assertThat(result.out()).containsIgnoringCase("contradict");
+  }
+
+  @Test
+  void a_variant_that_throws_or_overflows_costs_its_own_runs_only() throws IOException {
+    Result result = sweep(carts("[plain, plain+throws, plain+overflows]", "even"));
+    assertThat(result.err())
+        .contains("family faulty-cart threw")
+        .contains("can pass 2^62 - 1")
+        .doesNotContain("\tat ");
+    assertThat(result.out()).contains("plain on sat");
+  }
+
+  @Test
+  void solves_in_the_foreground_and_prints_one_json_object() {
+    Result result =
+        run(
+            "solve",
+            "faulty-cart",
+            CARTS.resolve("even").toString(),
+            "--backend",
+            "sat",
+            "--json");
+    assertThat(result.status()).as(result.err()).isEqualTo(ExitStatus.OK);
+    assertThat(result.out().lines()).hasSize(1);
+    assertThat(result.out())
+        .contains(
+            "\"status\":\"OPTIMAL\"",
+            "\"ending\":\"COMPLETED\"",
+            "\"check\":\"VALID\"",
+            "\"claim\":\"ALONE\"",
+            "\"wallSeconds\":",
+            "\"counters\":{");
+  }
+
+  static Stream<Arguments> mistakes() {
+    String even = CARTS.resolve("even").toString();
+    return Stream.of(
+        Arguments.of(
+            List.of("solve", "faulty-cat", even), "unknown family 'faulty-cat' (did you mean"),
+        Arguments.of(
+            List.of("solve", "faulty-cart", "no such file", "--backend", "sat"),
+            "unknown instance 'no such file'"),
+        Arguments.of(
+            List.of("solve", "faulty-cart", even, "--backend", "satt"),
+            "unknown backend 'satt' (did you mean 'sat'?)"),
+        Arguments.of(
+            List.of("solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+thros"),
+            "unknown amendment 'thros' (did you mean 'throws'?)"),
+        Arguments.of(
+            List.of("solve", "faulty-cart", even, "--backend", "sat", "--set", "solver=x"),
+            "option solver of sat: 'x' is not one of"),
+        Arguments.of(
+            List.of("solve", "faulty-cart", even, "--backend", "sat", "--wall", "soon"), "--wall:"),
+        Arguments.of(
+            List.of("solve", "faulty-cart", even, "--backend", "sat", "--work", "5 lemons"),
+            "--work:"),
+        Arguments.of(
+            List.of(
+                "solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+throws"),
+            "family faulty-cart threw"),
+        Arguments.of(
+            List.of("solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+exits"),
+            "ended without an answer"),
+        Arguments.of(
+            List.of(
+                "solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+overflows"),
+            "can pass 2^62 - 1"),
+        Arguments.of(List.of("sweep", "no such.yaml"), "no such file"),
+        Arguments.of(List.of("brief", "--ledger", "no ledger"), "there is no ledger"),
+        Arguments.of(List.of("show", "abcd", "--ledger", "no ledger"), "there is no ledger"),
+        Arguments.of(List.of("weigh"), "Unmatched argument"),
+        Arguments.of(List.of(), "a command is missing"));
+  }
+
+  @ParameterizedTest
+  @MethodSource("mistakes")
+  void a_mistake_gets_a_clear_line_and_status_2(List<String> args, String line) {
+    Result result = run(args.toArray(String[]::new));
+    assertThat(result.err()).contains(line).doesNotContain("\tat ");
+    assertThat(result.err().lines().findFirst().orElse("")).isNotBlank();
+    assertThat(result.status()).isEqualTo(ExitStatus.BAD_INPUT);
+  }
+
+  @Test
+  void help_of_every_command_has_examples_and_fits_80_columns() {
+    for (String command : List.of("sweep", "brief", "list", "lower", "show", "rerun", "solve")) {
+      Result result = run(command, "--help");
+      assertThat(result.status()).isEqualTo(ExitStatus.OK);
+      assertThat(result.out()).as(command).contains("Examples:", "steelyard " + command);
+      assertThat(result.out().lines()).as(command).allMatch(line -> line.length() <= 80);
+    }
+  }
+}
