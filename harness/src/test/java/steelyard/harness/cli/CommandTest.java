@@ -104,13 +104,7 @@ class CommandTest {
   @Test
   void solves_in_the_foreground_and_prints_one_json_object() {
     Result result =
-        run(
-            "solve",
-            "faulty-cart",
-            CARTS.resolve("even").toString(),
-            "--backend",
-            "sat",
-            "--json");
+        run("solve", "faulty-cart", CARTS.resolve("even").toString(), "--backend", "sat", "--json");
     assertThat(result.status()).as(result.err()).isEqualTo(ExitStatus.OK);
     assertThat(result.out().lines()).hasSize(1);
     assertThat(result.out())
@@ -146,8 +140,7 @@ class CommandTest {
             List.of("solve", "faulty-cart", even, "--backend", "sat", "--work", "5 lemons"),
             "--work:"),
         Arguments.of(
-            List.of(
-                "solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+throws"),
+            List.of("solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+throws"),
             "family faulty-cart threw"),
         Arguments.of(
             List.of("solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+exits"),
