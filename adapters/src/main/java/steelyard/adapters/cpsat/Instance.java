@@ -27,6 +27,11 @@ record Instance(
     return model.objective().filter(o -> o.sum().size() > 0).map(InnerObjective::new);
   }
 
+  /** The objective's value, if that is the same everywhere. */
+  Optional<Long> constantObjective() {
+    return model.objective().filter(o -> o.sum().size() == 0).map(o -> o.sum().constant());
+  }
+
   /** The message with the objective. */
   CpModelProto optimising(InnerObjective objective) {
     return message.toBuilder().setObjective(objective.message(places)).build();

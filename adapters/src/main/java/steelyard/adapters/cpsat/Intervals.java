@@ -10,7 +10,6 @@ import steelyard.variants.model.Atom;
 import steelyard.variants.model.Cumulative;
 import steelyard.variants.model.NoOverlap;
 import steelyard.variants.model.Task;
-import steelyard.variants.model.View;
 
 /**
  * Tasks as the library's intervals, one each, and what is said of them. An interval states start +
@@ -65,14 +64,9 @@ final class Intervals {
         enforcement);
   }
 
-  /**
-   * The cumulative relation under a capacity that stands in for the relation's own.
-   *
-   * @param capacity not negative: the library refutes a negative one even where no task runs
-   */
-  void cumulative(Cumulative relation, View capacity, int... enforcement) {
+  void cumulative(Cumulative relation, int... enforcement) {
     CumulativeConstraintProto.Builder resource =
-        CumulativeConstraintProto.newBuilder().setCapacity(places.expression(capacity));
+        CumulativeConstraintProto.newBuilder().setCapacity(places.expression(relation.capacity()));
     for (int i = 0; i < relation.tasks().size(); i++) {
       Task task = relation.tasks().get(i);
       if (mayBePresent(task)) {

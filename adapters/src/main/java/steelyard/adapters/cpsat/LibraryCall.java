@@ -62,7 +62,6 @@ final class LibraryCall {
     }
   }
 
-  @SuppressWarnings("CatchingUnchecked")
   private synchronized void guarded(Runnable action) {
     if (failure.get() != null) {
       return;
@@ -75,7 +74,8 @@ final class LibraryCall {
     }
   }
 
-  private void rethrow() {
+  /** Also makes what the listener did on other threads visible to this one. */
+  private synchronized void rethrow() {
     Throwable thrown = failure.get();
     if (thrown instanceof Error error) {
       throw error;

@@ -7,6 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.function.ObjIntConsumer;
 import steelyard.variants.model.Atom;
+import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Domain;
 
 /**
@@ -112,20 +113,16 @@ final class Literals {
 
   /** States the atom wherever all of {@code enforcement} are true, without a Boolean for it. */
   void imply(Atom atom, int... enforcement) {
-    LinearConstraintProto.Builder linear =
+    LinearConstraintProto.Builder variable =
         LinearConstraintProto.newBuilder().addVars(places.of(atom.variable())).addCoeffs(1);
-    switch (atom.op()) {
-      case GE -> linear.addDomain(atom.value()).addDomain(Long.MAX_VALUE);
-      case LE -> linear.addDomain(Long.MIN_VALUE).addDomain(atom.value());
-      case EQ -> linear.addDomain(atom.value()).addDomain(atom.value());
-      case NE ->
-          linear
-              .addDomain(Long.MIN_VALUE)
-              .addDomain(atom.value() - 1)
-              .addDomain(atom.value() + 1)
-              .addDomain(Long.MAX_VALUE);
-    }
-    proto.linear(linear, enforcement);
+    Comparison op =
+        switch (atom.op()) {
+          case GE -> Comparison.GE;
+          case LE -> Comparison.LE;
+          case EQ -> Comparison.EQ;
+          case NE -> Comparison.NE;
+        };
+    proto.linear(variable, op, atom.value(), enforcement);
   }
 
   /** Every atom that got a Boolean of its own, in order of making. */

@@ -6,6 +6,8 @@ import com.google.ortools.sat.CpModelProto;
 import com.google.ortools.sat.IntegerVariableProto;
 import com.google.ortools.sat.LinearConstraintProto;
 import java.util.Arrays;
+import java.util.stream.IntStream;
+import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.Longs;
 
@@ -26,6 +28,16 @@ final class ModelProto {
 
   static int negated(int literal) {
     return -literal - 1;
+  }
+
+  static int[] negated(int[] literals) {
+    return IntStream.of(literals).map(ModelProto::negated).toArray();
+  }
+
+  static int[] joined(int[] a, int... b) {
+    int[] both = Arrays.copyOf(a, a.length + b.length);
+    System.arraycopy(b, 0, both, a.length, b.length);
+    return both;
   }
 
   /** What follows is made by the posting of that id. */
@@ -68,8 +80,20 @@ final class ModelProto {
     return index;
   }
 
-  void linear(LinearConstraintProto.Builder linear, int... enforcement) {
-    post(ConstraintProto.newBuilder().setLinear(linear), linear.getVarsCount(), enforcement);
+  /** The terms' sum compares with {@code bound} wherever all of {@code enforcement} are true. */
+  void linear(LinearConstraintProto.Builder terms, Comparison op, long bound, int... enforcement) {
+    switch (op) {
+      case LE -> terms.addDomain(Long.MIN_VALUE).addDomain(bound);
+      case GE -> terms.addDomain(bound).addDomain(Long.MAX_VALUE);
+      case EQ -> terms.addDomain(bound).addDomain(bound);
+      case NE ->
+          terms
+              .addDomain(Long.MIN_VALUE)
+              .addDomain(bound - 1)
+              .addDomain(bound + 1)
+              .addDomain(Long.MAX_VALUE);
+    }
+    post(ConstraintProto.newBuilder().setLinear(terms), terms.getVarsCount(), enforcement);
   }
 
   /** At least one of the literals is true. */

@@ -1,5 +1,8 @@
 package steelyard.adapters.cpsat;
 
+import static steelyard.adapters.cpsat.ModelProto.joined;
+import static steelyard.adapters.cpsat.ModelProto.negated;
+
 import com.google.ortools.sat.AllDifferentConstraintProto;
 import com.google.ortools.sat.ConstraintProto;
 import com.google.ortools.sat.ElementConstraintProto;
@@ -7,7 +10,6 @@ import com.google.ortools.sat.LinearArgumentProto;
 import com.google.ortools.sat.LinearConstraintProto;
 import com.google.ortools.sat.TableConstraintProto;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
@@ -20,7 +22,6 @@ import steelyard.variants.model.BinPacking;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Cumulative;
-import steelyard.variants.model.Domain;
 import steelyard.variants.model.Element;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.LinearSum;
@@ -31,7 +32,6 @@ import steelyard.variants.model.RelationVisitor;
 import steelyard.variants.model.Table;
 import steelyard.variants.model.Task;
 import steelyard.variants.model.View;
-import steelyard.variants.model.Views;
 
 /**
  * States a relation wherever all of some literals are true, with the library's own constraint where
@@ -65,8 +65,8 @@ final class RelationLowering implements RelationVisitor<String> {
     return NATIVE;
   }
 
-  private String post(ConstraintProto.Builder constraint, int mentioned) {
-    proto.post(constraint, mentioned, enforcement);
+  private String post(ConstraintProto.Builder constraint, int named) {
+    proto.post(constraint, named, enforcement);
     return NATIVE;
   }
 
@@ -88,22 +88,8 @@ final class RelationLowering implements RelationVisitor<String> {
     for (int i = 0; i < sum.size(); i++) {
       linear.addVars(places.of(sum.variable(i))).addCoeffs(sum.coefficient(i));
     }
-    addDomain(linear, relation.op(), relation.bound());
-    proto.linear(linear, enforcement);
+    proto.linear(linear, relation.op(), relation.bound(), enforcement);
     return NATIVE;
-  }
-
-  private static void addDomain(LinearConstraintProto.Builder to, Comparison op, long bound) {
-    switch (op) {
-      case LE -> to.addDomain(Long.MIN_VALUE).addDomain(bound);
-      case GE -> to.addDomain(bound).addDomain(Long.MAX_VALUE);
-      case EQ -> to.addDomain(bound).addDomain(bound);
-      case NE ->
-          to.addDomain(Long.MIN_VALUE)
-              .addDomain(bound - 1)
-              .addDomain(bound + 1)
-              .addDomain(Long.MAX_VALUE);
-    }
   }
 
   /**
@@ -140,20 +126,6 @@ final class RelationLowering implements RelationVisitor<String> {
       made[i] = literals.of(canonical.get(i));
     }
     return made;
-  }
-
-  private static int[] negated(int[] literals) {
-    int[] negated = new int[literals.length];
-    for (int i = 0; i < negated.length; i++) {
-      negated[i] = ModelProto.negated(literals[i]);
-    }
-    return negated;
-  }
-
-  private static int[] joined(int[] a, int... b) {
-    int[] both = Arrays.copyOf(a, a.length + b.length);
-    System.arraycopy(b, 0, both, a.length, b.length);
-    return both;
   }
 
   @Override
@@ -213,7 +185,7 @@ final class RelationLowering implements RelationVisitor<String> {
     if (sum.isConstant()) {
       decided(sum.constant() == 0);
     } else {
-      proto.linear(sum.equalTo(0), enforcement);
+      proto.linear(sum.terms(), Comparison.EQ, -sum.constant(), enforcement);
     }
   }
 
@@ -247,29 +219,17 @@ final class RelationLowering implements RelationVisitor<String> {
     return NATIVE;
   }
 
+  /** The library refutes a negative capacity even where no task runs: there it is not stated. */
   @Override
   public String cumulative(Cumulative relation) {
-    View capacity = relation.capacity();
-    if (places.min(capacity) >= 0) {
-      parts.intervals().cumulative(relation, capacity, enforcement);
-      return NATIVE;
+    Atom usable = literals.canonical(relation.capacity().atLeast(0));
+    if (!usable.equals(Atom.FALSE)) {
+      parts.intervals().cumulative(relation, under(usable).enforcement);
     }
-    parts.intervals().cumulative(relation, nonNegative(capacity), enforcement);
-    relation.tasks().asList().forEach(task -> runsOnlyUnder(capacity, task));
-    return "native over a capacity that is not negative";
-  }
-
-  private void runsOnlyUnder(View capacity, Task task) {
-    Atom idle = task.duration().atMost(0);
-    clause(Clause.of(task.present().negated(), idle, capacity.atLeast(0)));
-  }
-
-  private View nonNegative(View view) {
-    int variable = places.fresh().variable(Domain.between(0, Math.max(0, places.max(view))));
-    places.declareFresh();
-    View floored = View.of(variable);
-    new RelationLowering(parts).maximum(new Maximum(Views.of(view, View.constant(0)), floored));
-    return floored;
+    for (Task task : relation.tasks().asList()) {
+      clause(Clause.of(task.present().negated(), task.duration().atMost(0), usable));
+    }
+    return NATIVE;
   }
 
   /**

@@ -13,6 +13,7 @@ import steelyard.adapters.spi.SolveOutcome;
 import steelyard.adapters.spi.SolveOutcome.Why;
 import steelyard.adapters.spi.SolveRequest;
 import steelyard.adapters.spi.Status;
+import steelyard.variants.model.LinearSum;
 
 /** The search for any solution or for a best one: one call of the library. */
 final class Search implements LibraryCall.Listener {
@@ -22,8 +23,8 @@ final class Search implements LibraryCall.Listener {
   private final Instance instance;
   private final SolveRequest request;
   private final Monitor monitor;
-  private final Goal goal;
   private final Optional<InnerObjective> objective;
+  private final Optional<Long> constant;
   private final Decisions decisions;
   private OptionalLong best = OptionalLong.empty();
   private OptionalLong bound = OptionalLong.empty();
@@ -34,8 +35,9 @@ final class Search implements LibraryCall.Listener {
     this.instance = instance;
     this.request = request;
     this.monitor = monitor;
-    this.goal = goal;
-    this.objective = goal instanceof Goal.Optimise ? instance.objective() : Optional.empty();
+    boolean optimise = goal instanceof Goal.Optimise;
+    this.objective = optimise ? instance.objective() : Optional.empty();
+    this.constant = optimise ? instance.constantObjective() : Optional.empty();
     this.decisions = new Decisions(instance);
   }
 
@@ -87,13 +89,9 @@ final class Search implements LibraryCall.Listener {
       innerBound(response.getInnerObjectiveLowerBound());
       return SolveOutcome.of(Status.OPTIMAL, outerBound(), Why.EXHAUSTED);
     }
-    boolean constant = goal instanceof Goal.Optimise && instance.model().objective().isPresent();
     return constant
-        ? SolveOutcome.of(
-            Status.OPTIMAL,
-            OptionalLong.of(instance.model().objective().get().sum().constant()),
-            Why.EXHAUSTED)
-        : SolveOutcome.of(Status.FEASIBLE, OptionalLong.empty(), Why.EXHAUSTED);
+        .map(value -> SolveOutcome.of(Status.OPTIMAL, OptionalLong.of(value), Why.EXHAUSTED))
+        .orElse(SolveOutcome.of(Status.FEASIBLE, OptionalLong.empty(), Why.EXHAUSTED));
   }
 
   private SolveOutcome unfinished(Status status, Limits limits, String said) {
@@ -138,8 +136,10 @@ final class Search implements LibraryCall.Listener {
     }
   }
 
+  /** Hears of a bound; what no sum can reach is the library's infinity. */
   private void innerBound(long inner) {
-    if (objective.isPresent() && (bound.isEmpty() || inner > bound.getAsLong())) {
+    boolean tighter = bound.isEmpty() || inner > bound.getAsLong();
+    if (objective.isPresent() && tighter && Math.abs(inner) <= LinearSum.LIMIT) {
       bound = OptionalLong.of(inner);
       monitor.bound(objective.get().outer(inner));
     }

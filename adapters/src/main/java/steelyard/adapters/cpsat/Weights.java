@@ -43,9 +43,10 @@ final class Weights {
     return constant;
   }
 
-  LinearConstraintProto.Builder equalTo(long total) {
-    LinearConstraintProto.Builder linear = LinearConstraintProto.newBuilder();
-    byPlace.forEach((place, weight) -> linear.addVars(place).addCoeffs(weight));
-    return linear.addDomain(total - constant).addDomain(total - constant);
+  /** The sum without its constant. */
+  LinearConstraintProto.Builder terms() {
+    LinearConstraintProto.Builder terms = LinearConstraintProto.newBuilder();
+    byPlace.forEach((place, weight) -> terms.addVars(place).addCoeffs(weight));
+    return terms;
   }
 }
