@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
+import java.util.function.BiConsumer;
 import java.util.stream.IntStream;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.IntVar;
@@ -11,6 +12,7 @@ import steelyard.variants.model.Model;
 import steelyard.variants.model.NoOverlap;
 import steelyard.variants.model.Task;
 import steelyard.variants.model.Tasks;
+import steelyard.variants.model.build.Draft;
 import steelyard.variants.model.build.ModelBuilder;
 
 /**
@@ -55,6 +57,11 @@ final class JobShop {
 
   /** Operations in order within jobs, no two at once on a machine, the makespan minimised. */
   static Model model(int[][] jobs) {
+    return model(jobs, Draft::minimize);
+  }
+
+  /** The same with a goal of its own, made of the makespan. */
+  static Model model(int[][] jobs, BiConsumer<Draft, IntVar> goal) {
     return ModelBuilder.of(
         draft -> {
           int horizon =
@@ -81,7 +88,7 @@ final class JobShop {
           byMachine
               .values()
               .forEach(tasks -> draft.group("machines").post(new NoOverlap(Tasks.of(tasks))));
-          draft.minimize(makespan);
+          goal.accept(draft, makespan);
         });
   }
 }

@@ -24,6 +24,7 @@ import steelyard.adapters.spi.Status;
 import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Constraint;
 import steelyard.variants.model.Domain;
+import steelyard.variants.model.IntVar;
 import steelyard.variants.model.Ints;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.LinearSum;
@@ -32,6 +33,7 @@ import steelyard.variants.model.Model;
 import steelyard.variants.model.Objective;
 import steelyard.variants.model.Objective.Sense;
 import steelyard.variants.model.Relation;
+import steelyard.variants.model.judge.Evaluator;
 import steelyard.variants.model.judge.RelationJudge;
 
 /** Optima, and the bounds on the way to them, are exact integers. */
@@ -67,6 +69,23 @@ class OptimiseTest {
       Objective objective = objective(sense, -(1L << 60) + 12_345, large, 1, -1);
       assertOptimum(domains, List.of(least, most), objective);
     }
+  }
+
+  /** 55 is the optimum of {@link JobShop#FT06}; beside 2^60 a double cannot tell it from 61. */
+  @Test
+  void provesTheOptimum_whenAFixedTermDwarfsTheRest() {
+    Model model =
+        JobShop.model(
+            JobShop.FT06,
+            (draft, makespan) -> {
+              IntVar one = draft.integer("one", 1, 1);
+              draft.minimize(one.times(1L << 60).plus(makespan));
+            });
+    Solved solved = Solving.solve(model, new Goal.Optimise());
+    assertThat(solved.outcome().status()).isEqualTo(Status.OPTIMAL);
+    assertThat(solved.outcome().bound()).hasValue((1L << 60) + 55);
+    assertThat(new Evaluator(model).judge(solved.heard().last()).objective())
+        .hasValue((1L << 60) + 55);
   }
 
   @Test
