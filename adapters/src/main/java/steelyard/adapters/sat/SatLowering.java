@@ -60,12 +60,13 @@ final class SatLowering implements Lowering {
     Deadline deadline = request.deadline();
     monitor.phase("count");
     Limits limits = new Limits(variables, clauses, deadline::stopAsked);
-    ModelEncoder counted = new ModelEncoder(model, edges(request), ClauseSink.NONE, limits);
+    ModelEncoder counted =
+        new ModelEncoder(model, settings.integer(SatBackend.MOST_EDGES), ClauseSink.NONE, limits);
     AtomicBoolean stop = new AtomicBoolean();
     try {
       counted.encode();
       monitor.phase("encode");
-      Loaded loaded = load(model, request, counted.cnf().variables(), stop);
+      Loaded loaded = load(counted, request, stop);
       return new SatLowering(model, request, counted.sizes(), stop, Optional.of(loaded));
     } catch (EncodingStopped e) {
       return switch (e.why()) {
@@ -77,25 +78,23 @@ final class SatLowering implements Lowering {
     }
   }
 
-  private static Loaded load(Model model, SolveRequest request, int variables, AtomicBoolean stop) {
+  private static Loaded load(ModelEncoder counted, SolveRequest request, AtomicBoolean stop) {
+    int variables = counted.cnf().variables();
     String configuration = request.settings().text(SatBackend.SOLVER);
     long conflicts =
         request.deadline().work().map(w -> (long) Math.ceil(w.amount())).orElse(Long.MAX_VALUE);
     SatSolver solver = new SatSolver(configuration, variables, stop, conflicts);
     Limits limits = new Limits(variables, Long.MAX_VALUE, request.deadline()::stopAsked);
-    ModelEncoder encoder = new ModelEncoder(model, edges(request), solver, limits);
+    ModelEncoder encoder = counted.into(solver, limits);
     encoder.encode();
+    encoder.cnf().liftLimits();
     return new Loaded(encoder, solver);
   }
 
-  private static long edges(SolveRequest request) {
-    return request.settings().integer(SatBackend.MOST_EDGES);
-  }
-
   private static String tooMany(long most, String what, String setting, ModelEncoder counted) {
-    return "sat would need more than %d %s (%s): %d variables and %d clauses up to %s"
-        .formatted(
-            most, what, setting, counted.cnf().variables(), counted.cnf().clauses(), counted.at());
+    String limit = "sat would need more than " + most + " " + what + " (" + setting + "): ";
+    String reached = counted.cnf().variables() + " variables, " + counted.cnf().clauses();
+    return limit + reached + " clauses up to " + counted.at();
   }
 
   @Override
@@ -127,7 +126,7 @@ final class SatLowering implements Lowering {
   @Override
   public <F extends Facet> Optional<F> facet(Class<F> kind) {
     return kind == Printable.class && loaded.isPresent()
-        ? Optional.of(kind.cast(new Dimacs()))
+        ? Optional.of(kind.cast(new Dimacs(loaded.get().encoder())))
         : Optional.empty();
   }
 
@@ -140,6 +139,12 @@ final class SatLowering implements Lowering {
   private final class Dimacs implements Printable {
     private static final String FORMAT = "dimacs";
 
+    private final ModelEncoder encoder;
+
+    Dimacs(ModelEncoder encoder) {
+      this.encoder = encoder;
+    }
+
     @Override
     public SortedSet<String> formats() {
       return Collections.unmodifiableSortedSet(new TreeSet<>(Collections.singleton(FORMAT)));
@@ -150,7 +155,7 @@ final class SatLowering implements Lowering {
       if (!format.equals(FORMAT)) {
         throw new IllegalArgumentException("sat prints dimacs, not '" + format + "'");
       }
-      DimacsText.write(model, edges(request), to);
+      DimacsText.write(model, encoder, sizes, to);
     }
   }
 }

@@ -2,7 +2,6 @@ package steelyard.adapters.sat;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -49,30 +48,10 @@ class PublishedPuzzlesTest {
   @ParameterizedTest
   @CsvSource({"2, 1", "3, 3", "4, 6", "5, 11", "6, 17", "7, 25"})
   void findsShortestRulers_asInA003022(int n, long length) {
-    Solved solved = Solved.of(ruler(n), new Goal.Optimise());
+    Solved solved = Solved.of(Rulers.of(n), new Goal.Optimise());
     assertThat(solved.outcome.status()).isEqualTo(Status.OPTIMAL);
     assertThat(solved.outcome.bound()).hasValue(length);
     assertThat(solved.solutions.get(solved.solutions.size() - 1).get(n - 1))
         .isEqualTo((int) length);
-  }
-
-  private static Model ruler(int n) {
-    return ModelBuilder.of(
-        draft -> {
-          List<IntVar> marks =
-              IntStream.range(0, n)
-                  .mapToObj(i -> draft.integer("m" + i, Domain.between(0, n * n)))
-                  .toList();
-          draft.group("first").post(marks.get(0).eq(0));
-          List<IntVar> distances = new ArrayList<>();
-          for (int i = 0; i < n; i++) {
-            for (int j = i + 1; j < n; j++) {
-              draft.group("order").post(marks.get(i).lt(marks.get(j)));
-              distances.add(draft.define("d" + i + "." + j, marks.get(j).minus(marks.get(i))));
-            }
-          }
-          draft.group("distances").post(Formula.holds(new AllDifferent(Views.of(distances))));
-          draft.minimize(marks.get(n - 1));
-        });
   }
 }

@@ -64,6 +64,11 @@ final class Solved implements Monitor {
     return solved;
   }
 
+  /** Hears what a lowering says that is not solved here. */
+  static Solved listener() {
+    return new Solved(solved -> {});
+  }
+
   static SolveRequest request(Map<String, String> settings, Deadline deadline) {
     return new SolveRequest(Settings.of(BACKEND.describe(), settings), 0, 1, deadline);
   }

@@ -16,7 +16,7 @@ public final class Cnf {
   private static final int CLAUSES_BETWEEN_LOOKS = 1 << 12;
 
   private final ClauseSink sink;
-  private final Limits limits;
+  private Limits limits;
   private int variables;
   private long clauses;
   private long literals;
@@ -33,6 +33,11 @@ public final class Cnf {
   public Cnf(ClauseSink sink, Limits limits) {
     this.sink = sink;
     this.limits = limits;
+  }
+
+  /** From now on there is no limit: what is still to come is little. */
+  public void liftLimits() {
+    limits = Limits.NONE;
   }
 
   /** How many variables there are; they are numbered from 1. */

@@ -2,6 +2,7 @@ package steelyard.adapters.sat.encoding;
 
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import steelyard.adapters.spi.Sizes;
 import steelyard.variants.model.Longs;
 import steelyard.variants.model.Model;
 import steelyard.variants.model.Posting;
@@ -19,17 +20,21 @@ public final class DimacsText {
     this.to = to;
   }
 
-  /** Writes the formula of {@code model}, encoding it twice: to count, and to write. */
-  public static void write(Model model, long mostEdges, Appendable to) throws IOException {
-    ModelEncoder counted = new ModelEncoder(model, mostEdges, ClauseSink.NONE, Limits.NONE);
-    counted.encode();
+  /**
+   * Writes a formula, encoding it once more.
+   *
+   * @param encoded an encoder that has encoded it
+   * @param sizes of the formula
+   */
+  public static void write(Model model, ModelEncoder encoded, Sizes sizes, Appendable to)
+      throws IOException {
     DimacsText text = new DimacsText(to);
-    text.variables(model, counted.integers());
-    text.postings(model, counted);
-    Cnf cnf = counted.cnf();
-    to.append("p cnf " + cnf.variables() + " " + cnf.clauses() + "\n");
+    text.variables(model, encoded.integers());
+    text.postings(model, encoded.clausesBeforePostings(), sizes.byPosting());
+    to.append("p cnf " + sizes.totals().get("variables") + " " + sizes.totals().get("clauses"));
+    to.append('\n');
     try {
-      new ModelEncoder(model, mostEdges, text::clause, Limits.NONE).encode();
+      encoded.into(text::clause, Limits.NONE).encode();
     } catch (UncheckedIOException e) {
       throw e.getCause();
     }
@@ -75,9 +80,8 @@ public final class DimacsText {
     return text.toString();
   }
 
-  private void postings(Model model, ModelEncoder counted) throws IOException {
-    Longs byPosting = counted.sizes().byPosting();
-    long at = counted.clausesBeforePostings();
+  private void postings(Model model, long before, Longs byPosting) throws IOException {
+    long at = before;
     comment("clauses 1.." + at + ": domains");
     for (Posting posting : model.lowered()) {
       long count = byPosting.get(posting.id());

@@ -30,13 +30,16 @@ import steelyard.variants.model.Variables;
  */
 public final class ModelEncoder {
   private final Model model;
+
+  /** Empty where the model was found to have no solution. */
+  private final Optional<List<Domain>> root;
+
   private final Cnf cnf;
   private final Integers integers;
   private final RelationEncoder relations;
   private final LinearEncoder linear;
   private final Fresh fresh;
   private final long mostEdges;
-  private final boolean isRefuted;
   private final long[] byPosting;
   private final SortedMap<String, SortedSet<String>> how = new TreeMap<>();
   private Optional<ObjectiveBound> objective = Optional.empty();
@@ -52,16 +55,24 @@ public final class ModelEncoder {
    * @param mostEdges a sum whose diagram would have more edges is encoded as a binary number
    */
   public ModelEncoder(Model model, long mostEdges, ClauseSink sink, Limits limits) {
+    this(model, RootDomains.of(model, limits.stop()), mostEdges, new Cnf(sink, limits));
+  }
+
+  private ModelEncoder(Model model, Optional<List<Domain>> root, long mostEdges, Cnf cnf) {
     this.model = model;
+    this.root = root;
     this.mostEdges = mostEdges;
-    this.cnf = new Cnf(sink, limits);
+    this.cnf = cnf;
     this.integers = new Integers(cnf);
     this.linear = new LinearEncoder(cnf, integers, mostEdges);
     this.relations = new RelationEncoder(cnf, integers, linear);
-    Optional<List<Domain>> bounded = RootDomains.of(model);
-    this.isRefuted = bounded.isEmpty();
-    this.fresh = isRefuted ? Fresh.beside(model.variables()) : Fresh.beside(bounded.get());
+    this.fresh = root.isPresent() ? Fresh.beside(root.get()) : Fresh.beside(model.variables());
     this.byPosting = new long[model.postings().size()];
+  }
+
+  /** An encoder of the same formula into another sink. */
+  public ModelEncoder into(ClauseSink sink, Limits limits) {
+    return new ModelEncoder(model, root, mostEdges, new Cnf(sink, limits));
   }
 
   /**
@@ -77,7 +88,7 @@ public final class ModelEncoder {
         integers.add(v, fresh.domain(v));
       }
     }
-    if (isRefuted) {
+    if (root.isEmpty()) {
       cnf.end();
     }
     clausesBeforePostings = cnf.clauses();

@@ -6,6 +6,7 @@ import java.util.Arrays;
 import java.util.BitSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
 import java.util.function.IntConsumer;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
@@ -43,6 +44,8 @@ final class RootDomains implements RelationVisitor<Void> {
   /** Slowly converging cycles, such as x &lt; y &lt; x, are cut off; what was found holds. */
   private static final int VISITS_PER_RULE = 50;
 
+  private static final int VISITS_BETWEEN_LOOKS = 1 << 12;
+
   private final Bounds bounds;
   private final List<Rule> rules = new ArrayList<>();
 
@@ -58,8 +61,12 @@ final class RootDomains implements RelationVisitor<Void> {
     this.startAt = new int[domains.size() + 1];
   }
 
-  /** The domains of the model's variables; empty if it is found to have no solution. */
-  static Optional<List<Domain>> of(Model model) {
+  /**
+   * The domains of the model's variables; empty if it is found to have no solution.
+   *
+   * @param stop asked now and then whether to be content with what has been found
+   */
+  static Optional<List<Domain>> of(Model model, BooleanSupplier stop) {
     List<Domain> domains =
         IntStream.range(0, model.variables().size()).mapToObj(model.variables()::domain).toList();
     RootDomains root = new RootDomains(domains);
@@ -67,7 +74,7 @@ final class RootDomains implements RelationVisitor<Void> {
       posting.definitions().forEach(definition -> root.learn(definition.constraint()));
       posting.asserted().forEach(root::learn);
     }
-    root.propagate();
+    root.propagate(stop);
     return root.bounds.hasFailed() ? Optional.empty() : Optional.of(root.bounds.domains());
   }
 
@@ -165,13 +172,16 @@ final class RootDomains implements RelationVisitor<Void> {
     return null;
   }
 
-  private void propagate() {
+  private void propagate(BooleanSupplier stop) {
     index();
     for (int r = 0; r < rules.size(); r++) {
       wake(r);
     }
     long visits = (long) VISITS_PER_RULE * rules.size();
     while (!open.isEmpty() && !bounds.hasFailed() && visits-- > 0) {
+      if (visits % VISITS_BETWEEN_LOOKS == 0 && stop.getAsBoolean()) {
+        return;
+      }
       int rule = open.remove();
       isOpen.clear(rule);
       rules.get(rule).apply();
