@@ -80,6 +80,9 @@ final class Allowances {
     String key = workByName.containsKey(name) ? name : backend.name();
     Field field = all.isSingle() ? all : workByName.get(key);
     if (field == null) {
+      if (!all.hasKeys()) {
+        return Optional.empty();
+      }
       all.mistake(
           "no amount for " + Phrases.quoted(name),
           "a sweep limits every backend by work or none; its units: " + units(backend));

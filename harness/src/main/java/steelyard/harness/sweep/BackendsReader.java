@@ -47,7 +47,6 @@ final class BackendsReader {
         readEntry(entry);
       }
     }
-    allowances.noteUnused(setups.stream().map(s -> s.backend().name()).distinct().toList());
     return setups;
   }
 

@@ -22,7 +22,7 @@ final class FairOrder {
    * - 1/(2k - 2) of its proportional share, k being the number of strata. O(N·k).
    *
    * @see <a href="https://doi.org/10.1016/0012-365X(80)90269-1">Tijdeman (1980), The chairman
-   *     assignment problem, Discrete Mathematics 32(3):323-330</a>
+   *     assignment problem, Discrete Mathematics 32(3):323-330 (from memory)</a>
    */
   static <T> List<T> merge(List<List<T>> strata) {
     List<List<T>> filled = strata.stream().filter(stratum -> !stratum.isEmpty()).toList();
@@ -77,7 +77,7 @@ final class FairOrder {
    * sizes.
    *
    * @see <a href="https://en.wikipedia.org/wiki/Van_der_Corput_sequence">van der Corput (1935),
-   *     Verteilungsfunktionen, Proc. Akad. Amsterdam 38:813-821</a>
+   *     Verteilungsfunktionen, Proc. Akad. Amsterdam 38:813-821 (from memory)</a>
    */
   private static List<Instance> acrossSizes(List<Instance> instances) {
     List<Instance> bySize =

@@ -68,16 +68,11 @@ final class SweepReader {
     }
     Optional<String> name =
         keys.required("name", "name: mould-shop-formulations").flatMap(Field::name);
-    Allowances allowances = Allowances.read(keys.optional("limits"));
-    List<Setup> setups =
-        keys.required("backends", "backends: [sat, cpsat]")
-            .map(field -> setups(field, allowances))
-            .orElse(List.of());
+    List<Setup> setups = setups(keys);
     List<Contest> contests = contests(root, keys, setups);
     List<Long> seeds = keys.optional("seeds").map(this::seeds).orElse(List.of(0L));
     TieMargin margin = keys.optional("tie-margin").map(this::tieMargin).orElse(TIE_MARGIN);
-    double penalty =
-        keys.optional("penalty").map(f -> f.atLeast(1).orElse(PENALTY)).orElse(PENALTY);
+    double penalty = keys.optional("penalty").map(this::penalty).orElse(PENALTY);
     int blockSize = count(keys, "block-size", 2, LARGEST_BLOCK, BLOCK_SIZE);
     String notes = keys.optional("notes").flatMap(Field::text).orElse("");
     int cores = cores(keys, setups);
@@ -97,10 +92,18 @@ final class SweepReader {
         remarks);
   }
 
-  private List<Setup> setups(Field field, Allowances allowances) {
+  /** All settings of all backends; none if any of them is wrong. */
+  private List<Setup> setups(Keys keys) {
+    Allowances allowances = Allowances.read(keys.optional("limits"));
+    Optional<Field> backends = keys.required("backends", "backends: [sat, cpsat]");
     int before = mistakes.count();
-    List<Setup> setups = new BackendsReader(catalogue, allowances).read(field);
-    return mistakes.count() == before ? setups : List.of();
+    List<Setup> setups =
+        backends.map(new BackendsReader(catalogue, allowances)::read).orElse(List.of());
+    if (mistakes.count() > before || backends.isEmpty()) {
+      return List.of();
+    }
+    allowances.noteUnused(setups.stream().map(s -> s.backend().name()).distinct().toList());
+    return setups;
   }
 
   private List<Contest> contests(Field root, Keys keys, List<Setup> setups) {
@@ -160,6 +163,10 @@ final class SweepReader {
             .flatMap(f -> f.parsed(Quantities::seconds))
             .orElse(TIE_MARGIN.absoluteSeconds());
     return new TieMargin(share, seconds);
+  }
+
+  private double penalty(Field field) {
+    return field.atLeast(1).orElse(PENALTY);
   }
 
   private int cores(Keys keys, List<Setup> setups) {

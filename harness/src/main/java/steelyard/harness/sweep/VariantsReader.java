@@ -154,9 +154,7 @@ final class VariantsReader {
 
   private void addSubsets(Field field, List<String> base, List<String> names) {
     if (names.size() > MOST_COMBINED) {
-      field.mistake(
-          names.size() + " amendments make " + (1L << names.size()) + " variants",
-          "combine at most " + MOST_COMBINED);
+      field.mistake(names.size() + " amendments; at most " + MOST_COMBINED + " are combined");
       return;
     }
     List<String> added = names.stream().filter(name -> !base.contains(name)).toList();

@@ -417,9 +417,13 @@ class SweepMistakesTests {
         .containsExactly(
             "sweep.yaml:5:22: limits.work.sat: unknown unit 'nodes'; write a number and a unit"
                 + " (conflicts): 1000 conflicts",
-            "sweep.yaml:5:39: limits.work.cpsat: '0 conflicts' is no work at all",
-            "sweep.yaml:5:52: limits.work.engin: unknown backend 'engin'",
+            "sweep.yaml:5:39: limits.work.cpsat: '0 conflicts' is no work at all");
+    assertThat(withMore("limits: {work: {sat: 1 conflicts, cpsat: 1 conflicts, cpsa: 3 nodes}}"))
+        .containsExactly(
+            "sweep.yaml:5:55: limits.work.cpsa: unknown backend 'cpsa' (did you mean 'cpsat'?)",
             "  in this sweep: sat, cpsat");
+    assertThat(withMore("limits: {work: [sat]}"))
+        .containsExactly("sweep.yaml:5:16: limits.work: expected keys with values, found a list");
   }
 
   // Candidates

@@ -48,16 +48,6 @@ public final class Field {
     return new Field("", root, root.place(), mistakes);
   }
 
-  /** Where the value stands. */
-  public Place place() {
-    return node.place();
-  }
-
-  /** The value's path from the root, such as {@code backends[2].name}. */
-  public String path() {
-    return path;
-  }
-
   /** Notes that something is wrong with this value. */
   public void mistake(String what, String... advice) {
     mistakes.add(node.place(), path, what, advice);
