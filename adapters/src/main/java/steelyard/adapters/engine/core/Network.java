@@ -132,6 +132,11 @@ public final class Network {
     return atom;
   }
 
+  /** Constraints posted so far: propagators, clauses and differences. */
+  public int size() {
+    return count + clauses.size() + arcs.size() / 2;
+  }
+
   private void building() {
     if (agenda.frozen()) {
       throw new IllegalStateException("constraints are posted before the first propagation");

@@ -1,6 +1,7 @@
 package steelyard.adapters.engine.propagators;
 
 import java.util.Arrays;
+import java.util.stream.LongStream;
 import steelyard.adapters.engine.core.Decidable;
 import steelyard.adapters.engine.core.Scope;
 import steelyard.adapters.engine.core.Store;
@@ -19,6 +20,9 @@ import steelyard.adapters.engine.core.Wiring;
  * <p>Source: Shaw (2004), A constraint for bin packing, CP, LNCS 3258:648-662, section 2.
  */
 public final class BinPacking implements Decidable {
+  /** What no load reaches: larger sizes are cut to it, which changes nothing. */
+  private static final long TOO_LARGE = Store.LIMIT + 1L;
+
   private final Scope bins;
   private final long[] sizes;
   private final Scope loads;
@@ -32,13 +36,9 @@ public final class BinPacking implements Decidable {
       throw new IllegalArgumentException(bins.size() + " items with " + sizes.length + " sizes");
     }
     this.bins = bins;
-    this.sizes = sizes.clone();
     this.loads = loads;
-    long sum = 0;
-    for (long size : sizes) {
-      sum = Math.addExact(sum, size);
-    }
-    total = sum;
+    this.sizes = LongStream.of(sizes).map(size -> Math.min(size, TOO_LARGE)).toArray();
+    total = LongStream.of(this.sizes).sum();
     packed = new long[loads.size()];
     possible = new long[loads.size()];
   }

@@ -19,8 +19,8 @@ import steelyard.adapters.engine.core.Wiring;
  * negative heights, CP, LNCS 2470:63-79, for the sweep; the profile is common practice.
  */
 public final class Cumulative implements Decidable {
-  private final Tasks tasks;
-  private final Tasks mirrored;
+  private final TaskScope tasks;
+  private final TaskScope mirrored;
   private final Scope demands;
   private final Scope capacity;
   private final Profile forward;
@@ -28,7 +28,7 @@ public final class Cumulative implements Decidable {
   private final EnergyCheck energy;
 
   /** {@code demands[i] ≥ 0} is what task i uses; {@code capacity} is one row. */
-  public Cumulative(Store s, Tasks tasks, Scope demands, Scope capacity) {
+  public Cumulative(Store s, TaskScope tasks, Scope demands, Scope capacity) {
     if (demands.size() != tasks.size() || capacity.size() != 1) {
       throw new IllegalArgumentException("a demand for each task and one capacity are needed");
     }
@@ -107,7 +107,7 @@ public final class Cumulative implements Decidable {
     return true;
   }
 
-  private boolean raiseStarts(Store s, Tasks timed, Profile profile) {
+  private boolean raiseStarts(Store s, TaskScope timed, Profile profile) {
     long most = capacity.max(s, 0);
     for (int i = 0; i < timed.size(); i++) {
       int presence = timed.presence(s, i);

@@ -18,7 +18,7 @@ import steelyard.adapters.engine.core.Store;
 final class EnergyCheck {
   private static final double MOST = 1L << 60;
 
-  private final Tasks tasks;
+  private final TaskScope tasks;
   private final Scope demands;
   private final Scope capacity;
   private final boolean safe;
@@ -29,7 +29,7 @@ final class EnergyCheck {
   private final int[] earliestStart;
   private final int[] latestEnd;
 
-  EnergyCheck(Store s, Tasks tasks, Scope demands, Scope capacity) {
+  EnergyCheck(Store s, TaskScope tasks, Scope demands, Scope capacity) {
     this.tasks = tasks;
     this.demands = demands;
     this.capacity = capacity;

@@ -15,12 +15,12 @@ import steelyard.adapters.engine.core.Wiring;
  * Forms: posted and conditional.
  */
 public final class NoOverlap implements Decidable {
-  private final Tasks tasks;
+  private final TaskScope tasks;
   private final UnaryRules forward;
   private final UnaryRules backward;
 
   /** The tasks do not overlap. */
-  public NoOverlap(Tasks tasks) {
+  public NoOverlap(TaskScope tasks) {
     this.tasks = tasks;
     forward = new UnaryRules(tasks);
     backward = new UnaryRules(tasks.mirrored());

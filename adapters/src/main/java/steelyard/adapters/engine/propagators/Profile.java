@@ -9,7 +9,7 @@ import steelyard.adapters.engine.core.Store;
  * step function: segment k begins at its time and ends where the next begins.
  */
 final class Profile {
-  private final Tasks tasks;
+  private final TaskScope tasks;
   private final Scope demands;
   private final int n;
   private final int[] byLatestStart;
@@ -21,7 +21,7 @@ final class Profile {
   private final long[] height;
   private int segments;
 
-  Profile(Tasks tasks, Scope demands) {
+  Profile(TaskScope tasks, Scope demands) {
     this.tasks = tasks;
     this.demands = demands;
     n = tasks.size();

@@ -16,6 +16,9 @@ import steelyard.adapters.engine.core.Store;
  * #entails}.
  */
 public final class Relations {
+  /** An entry of a tuple that stands for every value. */
+  public static final int ANY = Table.ANY;
+
   private final Network network;
   private final Store store;
 
@@ -131,9 +134,13 @@ public final class Relations {
             : new AllDifferentBounds(x));
   }
 
+  /** Whether {@link #allowed} takes the tuples: no column with {@link #ANY} is too wide. */
+  public boolean fits(Scope x, int[] tuples) {
+    return Table.fits(store, x, tuples);
+  }
+
   /**
-   * {@code when ⇒} the rows take one of the tuples, given one after the other; they {@link
-   * Table#fits fit}.
+   * {@code when ⇒} the rows take one of the tuples, one after the other; they {@link #fits fit}.
    */
   public void allowed(int tag, long when, Scope x, int[] tuples) {
     post(tag, when, new Table(store, x, tuples));
@@ -149,6 +156,35 @@ public final class Relations {
       }
       clause(tag, when, atoms);
     }
+  }
+
+  /** {@code when ⇒ array[index] = result}, counted from 0, the index within the array. */
+  public void element(int tag, long when, Scope array, Scope index, Scope result) {
+    if (array.size() == 0) {
+      clause(tag, when);
+    } else {
+      post(tag, when, new Element(store, array, index, result));
+    }
+  }
+
+  /** {@code when ⇒} the result is the greatest of the terms. */
+  public void maximum(int tag, long when, Scope terms, Scope result) {
+    post(tag, when, new Maximum(terms, result));
+  }
+
+  /** {@code when ⇒} no two tasks overlap. */
+  public void noOverlap(int tag, long when, TaskScope tasks) {
+    post(tag, when, new NoOverlap(tasks));
+  }
+
+  /** {@code when ⇒} at any time the demands of the tasks that run sum to at most the capacity. */
+  public void cumulative(int tag, long when, TaskScope tasks, Scope demands, Scope capacity) {
+    post(tag, when, new Cumulative(store, tasks, demands, capacity));
+  }
+
+  /** {@code when ⇒} the items' sizes in each bin sum to its load. */
+  public void binPacking(int tag, long when, Scope bins, long[] sizes, Scope loads) {
+    post(tag, when, new BinPacking(bins, sizes, loads));
   }
 
   /** {@code when ⇒ body}. */

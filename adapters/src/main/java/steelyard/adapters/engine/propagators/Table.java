@@ -25,7 +25,7 @@ import steelyard.adapters.engine.core.Wiring;
  */
 public final class Table implements Decidable {
   /** An entry that stands for every value. */
-  public static final int ANY = Integer.MAX_VALUE;
+  static final int ANY = Integer.MAX_VALUE;
 
   static final int NARROW = 4096;
 
@@ -54,7 +54,7 @@ public final class Table implements Decidable {
   }
 
   /** Whether no column with an entry {@link #ANY} has too many values for a list of them. */
-  public static boolean fits(Store s, Scope x, int[] tuples) {
+  static boolean fits(Store s, Scope x, int[] tuples) {
     for (int t = 0; t < tuples.length; t++) {
       int i = t % x.size();
       if (tuples[t] == ANY && x.max(s, i) - x.min(s, i) >= NARROW) {

@@ -13,7 +13,7 @@ import steelyard.adapters.engine.core.Store;
  * (2007), Global constraints in scheduling, thesis, Charles University, Prague.
  */
 final class UnaryRules {
-  private final Tasks tasks;
+  private final TaskScope tasks;
   private final int n;
   private final ThetaTree tree;
   private final int[] byEarliestStart;
@@ -29,7 +29,7 @@ final class UnaryRules {
   private final int[] duration;
   private final long[] bound;
 
-  UnaryRules(Tasks tasks) {
+  UnaryRules(TaskScope tasks) {
     this.tasks = tasks;
     n = tasks.size();
     tree = new ThetaTree(n);

@@ -1,5 +1,6 @@
 package steelyard.adapters.engine.search;
 
+import java.util.Arrays;
 import java.util.Optional;
 import steelyard.adapters.engine.core.Atom;
 import steelyard.adapters.engine.core.Network;
@@ -11,18 +12,21 @@ import steelyard.adapters.engine.core.Store;
  * the last conflict first (Lecoutre, Sais, Tabary and Vidal 2009, Reasoning from last conflict(s)
  * in constraint programming, Artificial Intelligence 173:1592-1614).
  *
- * <p>Values: towards the last solution, once there is one; before that, towards what the objective
- * likes, else up from the least. Wide domains are cut in half, or at the value sought, rather than
- * tried value by value.
+ * <p>Values: towards the last solution, once there is one; before that, towards what is suggested,
+ * what the objective likes, or the least. Wide domains are cut in half, or at the value sought,
+ * rather than tried value by value.
  */
 public final class Automatic implements Brancher {
   /** Domains of more values than this are cut rather than enumerated. */
   private static final int WIDE = 64;
 
+  /** No value is sought; it is its own negative, and beyond any domain. */
+  private static final int NOTHING = Integer.MIN_VALUE;
+
   private final OpenRows rows;
   private final boolean[] mirrored;
   private final boolean guided;
-  private int[] sought = new int[0];
+  private final int[] sought;
   private int conflicting = Store.ZERO;
 
   /**
@@ -34,6 +38,8 @@ public final class Automatic implements Brancher {
   public Automatic(Network network, Scope scope, Optional<Objective> objective, long seed) {
     rows = new OpenRows(network, scope, VariableOrder.WEIGHTED_DEGREE, seed);
     mirrored = new boolean[network.store().variables()];
+    sought = new int[mirrored.length];
+    Arrays.fill(sought, NOTHING);
     guided = objective.isPresent();
     objective.ifPresent(this::prefer);
   }
@@ -58,6 +64,12 @@ public final class Automatic implements Brancher {
     }
   }
 
+  /** Goes towards {@code value} for the variable of handle {@code h}, until there is a solution. */
+  public Automatic suggesting(int h, int value) {
+    sought[h >> 1] = (h & 1) == 0 ? value : -value;
+    return this;
+  }
+
   @Override
   public long next(Store s) {
     int h = s.fixed(conflicting) ? rows.pick(s) : conflicting;
@@ -69,11 +81,9 @@ public final class Automatic implements Brancher {
   }
 
   private long decide(Store s, int h) {
-    if (sought.length > 0) {
-      int value = mirrored[h >> 1] ? -sought[h >> 1] : sought[h >> 1];
-      if (s.has(h, value)) {
-        return towards(s, h, value);
-      }
+    int value = mirrored[h >> 1] ? -sought[h >> 1] : sought[h >> 1];
+    if (s.has(h, value)) {
+      return towards(s, h, value);
     }
     return s.size(h) <= WIDE ? Atom.le(h, s.min(h)) : ValueOrder.LOWER_HALF.decide(s, h);
   }
@@ -93,7 +103,6 @@ public final class Automatic implements Brancher {
   @Override
   public void solved(Store s) {
     if (guided) {
-      sought = new int[s.variables()];
       for (int v = 0; v < sought.length; v++) {
         sought[v] = s.min(2 * v);
       }

@@ -3,6 +3,7 @@ package steelyard.adapters.engine.search;
 import java.util.Arrays;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.function.Consumer;
 import java.util.function.Predicate;
 import steelyard.adapters.engine.core.Atom;
 import steelyard.adapters.engine.core.Network;
@@ -24,6 +25,7 @@ public final class Search {
   private Optional<Brancher> leader = Optional.empty();
   private Restarts restarts = Restarts.never();
   private Predicate<Store> listener = s -> true;
+  private Consumer<Store> rootListener = s -> {};
   private Limits limits = Limits.NONE;
 
   private boolean consistent;
@@ -73,6 +75,12 @@ public final class Search {
     return this;
   }
 
+  /** Shows the root to {@code look} when it has been propagated, unless that was a conflict. */
+  public Search onRoot(Consumer<Store> look) {
+    rootListener = look;
+    return this;
+  }
+
   /** Runs until the tree is done, a limit is reached or {@code stop} asks for the end. */
   public Ending run(Limits most, Stop stop) {
     limits = most;
@@ -81,6 +89,7 @@ public final class Search {
     consistent = network.propagate();
     if (consistent) {
       bound = objective.map(o -> OptionalLong.of(o.least(store))).orElse(bound);
+      rootListener.accept(store);
     }
     Optional<Ending> ending = Optional.empty();
     while (ending.isEmpty()) {

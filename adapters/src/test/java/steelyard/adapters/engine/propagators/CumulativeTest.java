@@ -20,7 +20,7 @@ class CumulativeTest {
   private static Subject subject(int seed, boolean flexible) {
     Random random = new Random(seed);
     int n = flexible ? 2 + random.nextInt(2) : 2 + random.nextInt(3);
-    TaskRows rows = new TaskRows(random, n, 2 + random.nextInt(5), 3, flexible);
+    RandomTasks rows = new RandomTasks(random, n, 2 + random.nextInt(5), 3, flexible);
     int[] fixedDemand = random.ints(n, 0, 4).toArray();
     int demandRow = flexible ? rows.add(Rows.range(0, 1 + random.nextInt(2))) : -1;
     int capacityRow = rows.add(Rows.random(random, 1, 0, 5, 3).row(0));
@@ -32,15 +32,15 @@ class CumulativeTest {
             (s, x) -> {
               Scope demands = Scope.of(s, new int[n], fixedDemand);
               if (demandRow >= 0) {
-                demands = TaskRows.row(x, demandRow).and(demands.rows(1, n));
+                demands = RandomTasks.row(x, demandRow).and(demands.rows(1, n));
               }
-              return new Cumulative(s, rows.tasks(s, x), demands, TaskRows.row(x, capacityRow));
+              return new Cumulative(s, rows.tasks(s, x), demands, RandomTasks.row(x, capacityRow));
             })
         .given(rows.linked(), (r, s, x, when) -> rows.postLinks(r, s, x));
   }
 
   private static boolean fits(
-      TaskRows rows, int[] values, int n, int[] fixedDemand, int demandRow, int capacityRow) {
+      RandomTasks rows, int[] values, int n, int[] fixedDemand, int demandRow, int capacityRow) {
     for (int t = 0; t < 20; t++) {
       int used = 0;
       boolean some = false;
@@ -72,7 +72,7 @@ class CumulativeTest {
     Network network = new Network(s);
     Scope demands = Scope.of(s, new int[2], new int[] {2, 2});
     Scope capacity = Scope.of(s, new int[1], new int[] {3});
-    network.post(new Cumulative(s, Tasks.fixed(s, start, 4, 3), demands, capacity), 0);
+    network.post(new Cumulative(s, TaskScope.fixed(s, start, 4, 3), demands, capacity), 0);
     assertThat(network.propagate()).isTrue();
     assertThat(start.min(s, 1)).isZero();
     s.push();
@@ -87,7 +87,7 @@ class CumulativeTest {
     Network network = new Network(s);
     Scope demands = Scope.of(s, new int[3], new int[] {2, 2, 3});
     Scope capacity = Scope.of(s, new int[1], new int[] {3});
-    network.post(new Cumulative(s, Tasks.fixed(s, start, 2, 2, 2), demands, capacity), 0);
+    network.post(new Cumulative(s, TaskScope.fixed(s, start, 2, 2, 2), demands, capacity), 0);
     assertThat(network.propagate()).isFalse();
   }
 }

@@ -26,7 +26,7 @@ class NoOverlapTest {
   private static Subject subject(int seed, boolean flexible) {
     Random random = new Random(seed);
     int n = flexible ? 3 : 2 + random.nextInt(4);
-    TaskRows rows = new TaskRows(random, n, 3 + random.nextInt(7), 4, flexible);
+    RandomTasks rows = new RandomTasks(random, n, 3 + random.nextInt(7), 4, flexible);
     return Subject.ofBody(
             "no overlap " + seed,
             rows.rows(),
@@ -36,7 +36,7 @@ class NoOverlapTest {
         .given(rows.linked(), (r, s, x, when) -> rows.postLinks(r, s, x));
   }
 
-  private static boolean apart(TaskRows rows, int[] values, int n) {
+  private static boolean apart(RandomTasks rows, int[] values, int n) {
     for (int i = 0; i < n; i++) {
       for (int j = i + 1; j < n; j++) {
         if (rows.present(values, i)
@@ -61,7 +61,7 @@ class NoOverlapTest {
   /** Tasks given by earliest start, latest end and duration. */
   private static final class Machine {
     final Store store = new Store();
-    final Tasks tasks;
+    final TaskScope tasks;
     final Scope start;
 
     Machine(int[]... windows) {
@@ -72,7 +72,7 @@ class NoOverlapTest {
         starts[i] = store.variable(windows[i][0], windows[i][1] - windows[i][2]);
       }
       start = Scope.of(starts);
-      tasks = Tasks.fixed(store, start, durations);
+      tasks = TaskScope.fixed(store, start, durations);
     }
 
     int[] earliestStarts() {
@@ -155,7 +155,7 @@ class NoOverlapTest {
     Store s = new Store();
     Scope start = Scope.of(s.variable(0, 2), s.variable(0, 2), s.variable(0, 3));
     int there = s.variable(0, 1);
-    Tasks fixed = Tasks.fixed(s, start, 3, 2, 2);
+    TaskScope fixed = TaskScope.fixed(s, start, 3, 2, 2);
     long[] present = {Atom.TRUE, Atom.TRUE, Atom.ge(there, 1)};
     Scope durations = Scope.of(s, new int[3], new int[] {3, 2, 2});
     Scope ends =
@@ -163,7 +163,7 @@ class NoOverlapTest {
             s, new int[] {start.handle(0), start.handle(1), start.handle(2)}, new int[] {3, 2, 2});
     assertThat(fixed.size()).isEqualTo(3);
     Network network = new Network(s);
-    network.post(new NoOverlap(new Tasks(start, durations, ends, present)), 0);
+    network.post(new NoOverlap(new TaskScope(start, durations, ends, present)), 0);
     assertThat(network.propagate()).isTrue();
     assertThat(s.max(there)).isZero();
     assertThat(start.min(s, 2)).isZero();

@@ -12,7 +12,7 @@ import steelyard.adapters.engine.core.Store;
  * Random tasks for tests, laid out in rows: a start each, and where it is not a constant a duration
  * with an end, and where the task is optional a presence.
  */
-final class TaskRows {
+final class RandomTasks {
   private static final int NONE = -1;
 
   private final List<int[]> rows = new ArrayList<>();
@@ -22,7 +22,7 @@ final class TaskRows {
   private final int[] endRow;
   private final int[] presenceRow;
 
-  TaskRows(Random random, int n, int horizon, int longest, boolean flexible) {
+  RandomTasks(Random random, int n, int horizon, int longest, boolean flexible) {
     startRow = new int[n];
     durationRow = new int[n];
     fixedDuration = new int[n];
@@ -90,7 +90,7 @@ final class TaskRows {
     }
   }
 
-  Tasks tasks(Store s, Scope x) {
+  TaskScope tasks(Store s, Scope x) {
     Scope starts = Scope.empty();
     Scope durations = Scope.empty();
     Scope ends = Scope.empty();
@@ -103,7 +103,7 @@ final class TaskRows {
       ends = ends.and(fixed ? shifted(s, start, fixedDuration[i]) : row(x, endRow[i]));
       present[i] = presenceRow[i] == NONE ? Atom.TRUE : x.ge(presenceRow[i], 1);
     }
-    return new Tasks(starts, durations, ends, present);
+    return new TaskScope(starts, durations, ends, present);
   }
 
   static Scope row(Scope x, int i) {

@@ -12,14 +12,14 @@ import steelyard.adapters.engine.core.Wiring;
  * from the times of a task that may be absent: what is certain is that it is absent if it cannot be
  * placed.
  */
-public final class Tasks {
+public final class TaskScope {
   private final Scope start;
   private final Scope duration;
   private final Scope end;
   private final long[] present;
 
   /** Rows of four columns; durations are at least 0. */
-  public Tasks(Scope start, Scope duration, Scope end, long[] present) {
+  public TaskScope(Scope start, Scope duration, Scope end, long[] present) {
     int n = start.size();
     if (duration.size() != n || end.size() != n || present.length != n) {
       throw new IllegalArgumentException("columns of tasks differ in length");
@@ -31,7 +31,7 @@ public final class Tasks {
   }
 
   /** Tasks of fixed durations that are always there. */
-  public static Tasks fixed(Store s, Scope start, int... durations) {
+  public static TaskScope fixed(Store s, Scope start, int... durations) {
     int n = start.size();
     int[] zero = new int[n];
     int[] handle = new int[n];
@@ -42,12 +42,13 @@ public final class Tasks {
       endOffset[i] = start.offset(i) + durations[i];
       always[i] = Atom.TRUE;
     }
-    return new Tasks(start, Scope.of(s, zero, durations), Scope.of(s, handle, endOffset), always);
+    return new TaskScope(
+        start, Scope.of(s, zero, durations), Scope.of(s, handle, endOffset), always);
   }
 
   /** The tasks with time running backwards: starts are negated ends. */
-  public Tasks mirrored() {
-    return new Tasks(end.negated(), duration, start.negated(), present);
+  public TaskScope mirrored() {
+    return new TaskScope(end.negated(), duration, start.negated(), present);
   }
 
   /** Number of tasks. */
