@@ -148,17 +148,23 @@ final class Clauses {
     int low = store.min(h);
     boolean consistent = true;
     int kept = 0;
-    for (int i = 0; i < boundsSize[h]; i += 2) {
+    int i = 0;
+    while (i < boundsSize[h] && consistent) {
       int threshold = bounds[h][i];
       int c = bounds[h][i + 1];
-      if (low < threshold || !consistent || !moved(c, Atom.ge(h ^ 1, 1 - threshold))) {
-        bounds[h][kept] = threshold;
-        bounds[h][kept + 1] = c;
-        kept += 2;
-        consistent &= low < threshold || !consistent || holds(c);
+      i += 2;
+      if (low >= threshold) {
+        if (moved(c, Atom.ge(h ^ 1, 1 - threshold))) {
+          continue;
+        }
+        consistent = holds(c);
       }
+      bounds[h][kept] = threshold;
+      bounds[h][kept + 1] = c;
+      kept += 2;
     }
-    boundsSize[h] = kept;
+    System.arraycopy(bounds[h], i, bounds[h], kept, boundsSize[h] - i);
+    boundsSize[h] -= i - kept;
     return consistent;
   }
 
@@ -166,19 +172,24 @@ final class Clauses {
     int v = h >> 1;
     boolean consistent = true;
     int kept = 0;
-    for (int i = 0; i < valuesSize[v]; i += 2) {
+    int i = 0;
+    while (i < valuesSize[v] && consistent) {
       int value = values[v][i];
       int clauseAndSign = values[v][i + 1];
+      i += 2;
       long atom = (clauseAndSign & 1) == 0 ? Atom.eq(2 * v, value) : Atom.ne(2 * v, value);
-      boolean look = consistent && store.truth(atom) < 0;
-      if (!look || !moved(clauseAndSign >> 1, atom)) {
-        values[v][kept] = value;
-        values[v][kept + 1] = clauseAndSign;
-        kept += 2;
-        consistent &= !look || holds(clauseAndSign >> 1);
+      if (store.truth(atom) < 0) {
+        if (moved(clauseAndSign >> 1, atom)) {
+          continue;
+        }
+        consistent = holds(clauseAndSign >> 1);
       }
+      values[v][kept] = value;
+      values[v][kept + 1] = clauseAndSign;
+      kept += 2;
     }
-    valuesSize[v] = kept;
+    System.arraycopy(values[v], i, values[v], kept, valuesSize[v] - i);
+    valuesSize[v] -= i - kept;
     return consistent;
   }
 

@@ -24,6 +24,11 @@ final class Lists {
     item[size++] = value;
   }
 
+  /** Number of lists. */
+  int count() {
+    return start.length - 1;
+  }
+
   int size(int list) {
     return end(list) - start(list);
   }

@@ -23,8 +23,7 @@ public final class Network {
   private Propagator[] propagators = new Propagator[16];
   private int[] tags = new int[16];
   private int count;
-  private Lists scopes;
-  private long[] weight;
+  private Weights weights;
   private boolean inconsistent;
   private Stop stop = Stop.NEVER;
   private boolean stopped;
@@ -87,32 +86,40 @@ public final class Network {
     int size = 0;
     for (long atom : atoms) {
       int truth = store.truth(atom);
-      if (truth > 0 || contains(kept, size, Atom.not(atom))) {
+      if (truth > 0) {
         return;
       }
-      if (truth == 0 && !contains(kept, size, asBound(atom))) {
+      if (truth == 0) {
         kept[size++] = asBound(atom);
       }
     }
+    size = distinct(kept, size);
     if (size > 1) {
       clauses.add(tag, kept, size);
     } else {
-      tally.propagated(tag);
-      store.running = Store.DECISION;
-      if (!store.require(size == 0 ? Atom.FALSE : kept[0], 0)) {
-        tally.failed(tag);
-        inconsistent = true;
-      }
+      fact(tag, size == 0 ? Atom.FALSE : kept[0]);
     }
   }
 
-  private static boolean contains(long[] atoms, int size, long atom) {
+  /** Sorts the atoms, as a clause must not watch one twice, and returns how many there are. */
+  private static int distinct(long[] atoms, int size) {
+    Arrays.sort(atoms, 0, size);
+    int distinct = 0;
     for (int i = 0; i < size; i++) {
-      if (atoms[i] == atom) {
-        return true;
+      if (i == 0 || atoms[i] != atoms[i - 1]) {
+        atoms[distinct++] = atoms[i];
       }
     }
-    return false;
+    return distinct;
+  }
+
+  private void fact(int tag, long atom) {
+    tally.propagated(tag);
+    store.running = Store.DECISION;
+    if (!store.require(atom, 0)) {
+      tally.failed(tag);
+      inconsistent = true;
+    }
   }
 
   /** At the root, [x = k] and [x ≠ k] with k at an end of the domain are bounds. */
@@ -233,9 +240,7 @@ public final class Network {
     }
     agenda.freeze(segments, wiring.subscribers(segments), costs);
     arcs.freeze();
-    scopes = wiring.scopes(count);
-    weight = new long[store.variables()];
-    addDegrees();
+    weights = new Weights(store.variables(), wiring.scopes(count), clauses, arcs);
     wakeAll();
   }
 
@@ -248,60 +253,25 @@ public final class Network {
     }
   }
 
-  private void addDegrees() {
-    for (int p = 0; p < count; p++) {
-      bump(p);
-    }
-    for (int c = 0; c < clauses.size(); c++) {
-      bumpClause(c);
-    }
-    for (int a = 0; a < arcs.size(); a++) {
-      bumpArc(a);
-    }
-  }
-
   private void blame() {
     int by = store.failedBy();
     int why = store.failedWhy();
     if (by >= 0) {
       tally.failed(tags[by]);
-      bump(by);
+      weights.bump(by);
     } else if (by == Store.CLAUSE) {
       tally.failed(clauses.tag(why));
-      bumpClause(why);
+      weights.bumpClause(why);
     } else if (by == Store.ARC) {
       int arc = arcs.blamed(why);
       tally.failed(arcs.tag(arc));
-      bumpArc(arc);
+      weights.bumpArc(arc);
     }
   }
 
-  private void bump(int p) {
-    for (int i = 0; i < scopes.size(p); i++) {
-      weight[scopes.get(p, i)]++;
-    }
-  }
-
-  private void bumpClause(int c) {
-    for (int i = clauses.first(c); i < clauses.end(c); i++) {
-      weight[Atom.variable(clauses.literal(i))]++;
-    }
-  }
-
-  private void bumpArc(int a) {
-    weight[arcs.source(a) >> 1]++;
-    weight[arcs.target(a) >> 1]++;
-    weight[Atom.variable(arcs.when(a))]++;
-  }
-
-  /**
-   * The weighted degree of h: the constraints on it, each with one more than the conflicts it has
-   * found (Boussemart, Hemery, Lecoutre and Sais 2004, Boosting systematic search by weighting
-   * constraints, ECAI 146-150). Differing from the paper, a constraint keeps counting when its
-   * other variables are fixed, which makes this a look-up.
-   */
+  /** The weighted degree of h; see {@link Weights}. */
   public long weight(int h) {
-    return weight[h >> 1];
+    return weights.of(h >> 1);
   }
 
   /** Propagations so far. */

@@ -33,24 +33,31 @@ public final class Sum {
       throw new IllegalArgumentException(a.length + " coefficients for " + x.size() + " terms");
     }
     check(s, a, x);
-    int[] positionOf = new int[s.variables()];
-    long[] net = new long[a.length];
-    int[] variable = new int[a.length];
-    int size = 0;
     long constant = 0;
     for (int i = 0; i < a.length; i++) {
-      int v = x.handle(i) >> 1;
       constant += a[i] * x.offset(i);
-      if (v == Store.ZERO) {
-        continue;
-      }
-      if (positionOf[v] == 0) {
-        variable[size++] = v;
-        positionOf[v] = size;
-      }
-      net[positionOf[v] - 1] += (x.handle(i) & 1) == 0 ? a[i] : -a[i];
     }
-    return normal(net, variable, size, constant);
+    long[] net = new long[a.length];
+    int[] first = firstMentions(x);
+    for (int i = 0; i < a.length; i++) {
+      net[first[i]] += (x.handle(i) & 1) == 0 ? a[i] : -a[i];
+    }
+    return normal(net, x, constant);
+  }
+
+  /** For each row, the first row of the same variable. */
+  private static int[] firstMentions(Scope x) {
+    long[] rows = new long[x.size()];
+    for (int i = 0; i < rows.length; i++) {
+      rows[i] = (long) (x.handle(i) >> 1) << 32 | i;
+    }
+    Arrays.sort(rows);
+    int[] first = new int[rows.length];
+    for (int k = 0; k < rows.length; k++) {
+      boolean again = k > 0 && rows[k] >>> 32 == rows[k - 1] >>> 32;
+      first[(int) rows[k]] = again ? first[(int) rows[k - 1]] : (int) rows[k];
+    }
+    return first;
   }
 
   private static void check(Store s, long[] a, Scope x) {
@@ -70,14 +77,15 @@ public final class Sum {
     }
   }
 
-  private static Sum normal(long[] net, int[] variable, int size, long constant) {
+  private static Sum normal(long[] net, Scope x, long constant) {
     int kept = 0;
-    long[] coefficient = new long[size];
-    int[] handle = new int[size];
-    for (int i = 0; i < size; i++) {
-      if (net[i] != 0) {
+    long[] coefficient = new long[net.length];
+    int[] handle = new int[net.length];
+    for (int i = 0; i < net.length; i++) {
+      int variable = x.handle(i) >> 1;
+      if (net[i] != 0 && variable != Store.ZERO) {
         coefficient[kept] = Math.abs(net[i]);
-        handle[kept++] = 2 * variable[i] + (net[i] < 0 ? 1 : 0);
+        handle[kept++] = 2 * variable + (net[i] < 0 ? 1 : 0);
       }
     }
     return new Sum(Arrays.copyOf(coefficient, kept), Arrays.copyOf(handle, kept), constant);

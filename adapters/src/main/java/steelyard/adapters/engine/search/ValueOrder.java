@@ -19,13 +19,13 @@ public enum ValueOrder {
       return Atom.ge(h, s.max(h));
     }
   },
-  /** The median value, the lower of two, then all others. */
+  /** The median value, the lower of two, then all others; of wide domains the middle. */
   MEDIAN {
     @Override
     long decide(Store s, int h) {
       int value = s.min(h);
-      if (!s.mayHaveHoles(h)) {
-        value += (s.max(h) - value) / 2;
+      if (!s.mayHaveHoles(h) || s.max(h) - value > COUNTED) {
+        value = s.next(h, middle(s, h));
       } else {
         for (int below = (s.size(h) - 1) / 2; below > 0 && value < s.max(h); below--) {
           value = s.next(h, value + 1);
@@ -48,6 +48,9 @@ public enum ValueOrder {
       return Atom.ge(h, middle(s, h) + 1);
     }
   };
+
+  /** Values up to which a median is counted out. */
+  private static final int COUNTED = 4096;
 
   /** The atom to try for h, which is open. */
   abstract long decide(Store s, int h);
