@@ -1,8 +1,8 @@
 package steelyard.adapters.engine.core;
 
 /**
- * The weighted degree of each variable: the constraints on it, each with one more than the conflicts
- * it has found.
+ * The weighted degree of each variable: the constraints on it, each with one more than the
+ * conflicts it has found.
  *
  * <p>Source: Boussemart, Hemery, Lecoutre and Sais (2004), Boosting systematic search by weighting
  * constraints, ECAI 146-150. Differing from the paper, a constraint keeps counting when its other
