@@ -16,19 +16,13 @@ has_jdk() {
   fi
 }
 
-# Charts draw text: Java without a screen still needs a font.
-has_fonts() {
-  command -v fc-list >/dev/null 2>&1 && [ -n "$(fc-list 2>/dev/null | head -n 1)" ]
-}
-
 ensure_toolchain() {
   missing=
   has_jdk || missing="$missing openjdk-17-jdk-headless"
   command -v mvn >/dev/null 2>&1 || missing="$missing maven"
-  has_fonts || missing="$missing fontconfig fonts-dejavu-core"
   [ -n "$missing" ] || return 0
   if ! command -v apt-get >/dev/null 2>&1; then
-    echo "$me: install a JDK 17 or newer, Maven and a font, then run this again" >&2
+    echo "$me: install a JDK 17 or newer and Maven, then run this again" >&2
     exit 2
   fi
   if [ "$(id -u)" -eq 0 ]; then
