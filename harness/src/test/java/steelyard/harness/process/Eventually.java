@@ -5,13 +5,13 @@ import java.util.concurrent.locks.LockSupport;
 import java.util.function.BooleanSupplier;
 
 /** Waits for what another process brings about. */
-final class Eventually {
+public final class Eventually {
   private static final long DEADLINE_NANOS = TimeUnit.SECONDS.toNanos(30);
 
   private Eventually() {}
 
   /** Looks again and again until the condition holds; false once thirty seconds have passed. */
-  static boolean holds(BooleanSupplier condition) {
+  public static boolean holds(BooleanSupplier condition) {
     long from = System.nanoTime();
     while (!condition.getAsBoolean()) {
       if (System.nanoTime() - from > DEADLINE_NANOS) {
