@@ -1,5 +1,6 @@
 package steelyard.adapters.cpsat;
 
+import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import steelyard.adapters.cpsat.RelationLowering.Parts;
@@ -37,7 +38,7 @@ final class ConstraintLowering {
       lower(conditional);
     } else {
       Relation relation = (Relation) constraint;
-      note(relation.kind(), relation.accept(new RelationLowering(parts)));
+      lower(Atom.TRUE, relation, relation.kind());
     }
   }
 
@@ -45,11 +46,19 @@ final class ConstraintLowering {
     Atom when = parts.literals().canonical(conditional.when());
     Relation then = conditional.then();
     if (conditional.mode() != Conditional.Mode.ONLY_IF && !when.equals(Atom.FALSE)) {
-      note(then.kind() + " if", then.accept(new RelationLowering(parts, given(when))));
+      lower(when, then, then.kind() + " if");
     }
     if (conditional.mode() != Conditional.Mode.IF && !when.equals(Atom.TRUE)) {
       note(then.kind() + " only if", refuteUnless(when, then));
     }
+  }
+
+  /** States the relation wherever a canonical atom is true. */
+  private void lower(Atom when, Relation relation, String form) {
+    Optional<String> stated = relation.accept(new RelationLowering(parts, given(when)));
+    note(
+        form,
+        stated.orElseGet(() -> decompose(new Conditional(when, Conditional.Mode.IF, relation))));
   }
 
   /** The literal of a canonical atom as enforcement; none of a true one. */
@@ -61,17 +70,20 @@ final class ConstraintLowering {
     int[] otherwise = given(when.negated());
     RelationLowering lowering = new RelationLowering(parts, otherwise);
     if (relation instanceof Linear linear) {
-      return lowering.linear(negation(linear));
+      return lowering.linear(negation(linear)).orElseThrow();
     }
     if (relation instanceof Clause clause) {
       clause.atoms().stream().forEach(atom -> lowering.clause(Clause.of(atom.negated())));
       return "native";
     }
-    if (relation instanceof Table table) {
-      return lowering.table(negation(table));
-    }
-    Conditional condition = new Conditional(when, Conditional.Mode.ONLY_IF, relation);
-    Reduction reduction = Decomposition.of(condition, parts.places().fresh());
+    Optional<String> stated =
+        relation instanceof Table table ? lowering.table(negation(table)) : Optional.empty();
+    return stated.orElseGet(
+        () -> decompose(new Conditional(when, Conditional.Mode.ONLY_IF, relation)));
+  }
+
+  private String decompose(Conditional constraint) {
+    Reduction reduction = Decomposition.of(constraint, parts.places().fresh());
     parts.places().declareFresh();
     ConstraintLowering quietly = new ConstraintLowering(parts);
     reduction.definitions().forEach(d -> quietly.lower(d.constraint()));

@@ -13,32 +13,46 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
-import steelyard.adapters.spi.Decomposition;
-import steelyard.adapters.spi.Truth;
+import steelyard.variants.model.Absolute;
 import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.AllDifferentExcept;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.Atoms;
 import steelyard.variants.model.BinPacking;
+import steelyard.variants.model.Circuit;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Comparison;
+import steelyard.variants.model.Count;
 import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.DistinctValues;
+import steelyard.variants.model.Division;
 import steelyard.variants.model.Element;
+import steelyard.variants.model.GlobalCardinality;
+import steelyard.variants.model.Inverse;
+import steelyard.variants.model.Knapsack;
+import steelyard.variants.model.Lexicographic;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.LinearSum;
 import steelyard.variants.model.Maximum;
+import steelyard.variants.model.Modulo;
 import steelyard.variants.model.NoOverlap;
-import steelyard.variants.model.Relation;
+import steelyard.variants.model.NoOverlap2D;
+import steelyard.variants.model.Precedence;
+import steelyard.variants.model.Product;
+import steelyard.variants.model.Regular;
 import steelyard.variants.model.RelationVisitor;
+import steelyard.variants.model.Subcircuit;
 import steelyard.variants.model.Table;
 import steelyard.variants.model.Task;
 import steelyard.variants.model.View;
+import steelyard.variants.model.Views;
 
 /**
  * States a relation wherever all of some literals are true, with the library's own constraint where
- * it has one. Answers how.
+ * it has one. Answers how; empty, and nothing stated, where the shared decomposition is better.
  */
-final class RelationLowering implements RelationVisitor<String> {
-  private static final String NATIVE = "native";
+final class RelationLowering implements RelationVisitor<Optional<String>> {
+  private static final Optional<String> NATIVE = Optional.of("native");
 
   private final Parts parts;
   private final ModelProto proto;
@@ -58,28 +72,20 @@ final class RelationLowering implements RelationVisitor<String> {
   record Parts(ModelProto proto, Places places, Literals literals, Intervals intervals) {}
 
   /** States that the relation cannot hold, or nothing where it always does. */
-  private String decided(boolean holds) {
+  private Optional<String> decided(boolean holds) {
     if (!holds) {
       proto.clause(negated(enforcement));
     }
     return NATIVE;
   }
 
-  private String post(ConstraintProto.Builder constraint, int named) {
+  private Optional<String> post(ConstraintProto.Builder constraint, int named) {
     proto.post(constraint, named, enforcement);
     return NATIVE;
   }
 
-  private String decomposed(Relation relation) {
-    Truth truth = Decomposition.of(relation, places.fresh());
-    places.declareFresh();
-    truth.definitions().forEach(d -> new ConstraintLowering(parts).lower(d.constraint()));
-    truth.holds().forEach(this::clause);
-    return truth.how();
-  }
-
   @Override
-  public String linear(Linear relation) {
+  public Optional<String> linear(Linear relation) {
     LinearSum sum = relation.sum();
     if (sum.size() == 0) {
       return decided(relation.op().holds(0, relation.bound()));
@@ -97,7 +103,7 @@ final class RelationLowering implements RelationVisitor<String> {
    * atom's variable under the other instead of making one.
    */
   @Override
-  public String clause(Clause relation) {
+  public Optional<String> clause(Clause relation) {
     Atoms atoms = relation.atoms();
     List<Atom> open = new ArrayList<>(atoms.size());
     for (int i = 0; i < atoms.size(); i++) {
@@ -129,7 +135,7 @@ final class RelationLowering implements RelationVisitor<String> {
   }
 
   @Override
-  public String allDifferent(AllDifferent relation) {
+  public Optional<String> allDifferent(AllDifferent relation) {
     AllDifferentConstraintProto.Builder different =
         AllDifferentConstraintProto.newBuilder().addAllExprs(places.expressions(relation.scope()));
     return post(ConstraintProto.newBuilder().setAllDiff(different), relation.scope().size());
@@ -142,14 +148,14 @@ final class RelationLowering implements RelationVisitor<String> {
    * "Generality versus Specificity", AAAI, 660-664.
    */
   @Override
-  public String element(Element relation) {
+  public Optional<String> element(Element relation) {
     if (relation.array().size() == 0) {
       return decided(false);
     }
     if (!relation.isConstantArray()) {
       within(relation.index(), relation.array().size());
       IntStream.range(0, relation.array().size()).forEach(i -> entry(relation, i));
-      return "implication per index (Van Hentenryck & Carillon 1988)";
+      return Optional.of("implication per index (Van Hentenryck & Carillon 1988)");
     }
     ElementConstraintProto.Builder element =
         ElementConstraintProto.newBuilder()
@@ -190,7 +196,7 @@ final class RelationLowering implements RelationVisitor<String> {
   }
 
   @Override
-  public String table(Table relation) {
+  public Optional<String> table(Table relation) {
     boolean allowed = relation.polarity() == Table.Polarity.ALLOWED;
     if (relation.rows().size() == 0) {
       return decided(!allowed);
@@ -201,11 +207,11 @@ final class RelationLowering implements RelationVisitor<String> {
     Optional<TableConstraintProto.Builder> table = TableLowering.of(relation, places);
     return table.isPresent()
         ? post(ConstraintProto.newBuilder().setTable(table.get()), relation.scope().size())
-        : decomposed(relation);
+        : Optional.empty();
   }
 
   @Override
-  public String maximum(Maximum relation) {
+  public Optional<String> maximum(Maximum relation) {
     LinearArgumentProto.Builder maximum =
         LinearArgumentProto.newBuilder()
             .addAllExprs(places.expressions(relation.terms()))
@@ -214,14 +220,20 @@ final class RelationLowering implements RelationVisitor<String> {
   }
 
   @Override
-  public String noOverlap(NoOverlap relation) {
+  public Optional<String> absolute(Absolute relation) {
+    Views both = Views.of(relation.operand(), relation.operand().negated());
+    return maximum(new Maximum(both, relation.result()));
+  }
+
+  @Override
+  public Optional<String> noOverlap(NoOverlap relation) {
     parts.intervals().noOverlap(relation, enforcement);
     return NATIVE;
   }
 
   /** The library refutes a negative capacity even where no task runs: there it is not stated. */
   @Override
-  public String cumulative(Cumulative relation) {
+  public Optional<String> cumulative(Cumulative relation) {
     Atom usable = literals.canonical(relation.capacity().atLeast(0));
     if (!usable.equals(Atom.FALSE)) {
       parts.intervals().cumulative(relation, under(usable).enforcement);
@@ -237,7 +249,7 @@ final class RelationLowering implements RelationVisitor<String> {
    * Constraint for Bin Packing", CP, LNCS 3258:648-662, section 2.
    */
   @Override
-  public String binPacking(BinPacking relation) {
+  public Optional<String> binPacking(BinPacking relation) {
     int bins = relation.loads().size();
     for (int i = 0; i < relation.bins().size(); i++) {
       within(relation.bins().get(i), bins);
@@ -245,7 +257,7 @@ final class RelationLowering implements RelationVisitor<String> {
     for (int b = 0; b < bins; b++) {
       load(relation, b);
     }
-    return "weighted sum of item-in-bin literals per bin (Shaw 2004)";
+    return Optional.of("weighted sum of item-in-bin literals per bin (Shaw 2004)");
   }
 
   /** What is larger than the largest load stays out, so that sums of sizes cannot overflow. */
@@ -263,5 +275,80 @@ final class RelationLowering implements RelationVisitor<String> {
     }
     weights.add(-1, load, places);
     isZero(weights);
+  }
+
+  @Override
+  public Optional<String> allDifferentExcept(AllDifferentExcept relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> regular(Regular relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> globalCardinality(GlobalCardinality relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> count(Count relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> distinctValues(DistinctValues relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> product(Product relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> division(Division relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> modulo(Modulo relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> lexicographic(Lexicographic relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> inverse(Inverse relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> circuit(Circuit relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> subcircuit(Subcircuit relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> noOverlap2D(NoOverlap2D relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> knapsack(Knapsack relation) {
+    return Optional.empty();
+  }
+
+  @Override
+  public Optional<String> precedence(Precedence relation) {
+    return Optional.empty();
   }
 }

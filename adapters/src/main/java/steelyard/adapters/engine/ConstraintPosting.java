@@ -107,7 +107,7 @@ final class ConstraintPosting {
     note(form, reduction.how());
     ConstraintPosting quietly = new ConstraintPosting(this);
     reduction.definitions().forEach(d -> quietly.post(d.constraint(), tag));
-    reduction.asserted().forEach(clause -> quietly.post(clause, tag));
+    reduction.asserted().forEach(simpler -> quietly.post(simpler, tag));
   }
 
   private ConstraintPosting(ConstraintPosting of) {

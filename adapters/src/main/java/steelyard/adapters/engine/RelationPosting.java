@@ -6,18 +6,35 @@ import steelyard.adapters.engine.core.Scope;
 import steelyard.adapters.engine.propagators.Level;
 import steelyard.adapters.engine.propagators.Relations;
 import steelyard.adapters.engine.propagators.TaskScope;
+import steelyard.variants.model.Absolute;
 import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.AllDifferentExcept;
 import steelyard.variants.model.BinPacking;
+import steelyard.variants.model.Circuit;
 import steelyard.variants.model.Clause;
+import steelyard.variants.model.Count;
 import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.DistinctValues;
+import steelyard.variants.model.Division;
 import steelyard.variants.model.Element;
+import steelyard.variants.model.GlobalCardinality;
+import steelyard.variants.model.Inverse;
+import steelyard.variants.model.Knapsack;
+import steelyard.variants.model.Lexicographic;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.Maximum;
+import steelyard.variants.model.Modulo;
 import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.NoOverlap2D;
+import steelyard.variants.model.Precedence;
+import steelyard.variants.model.Product;
+import steelyard.variants.model.Regular;
 import steelyard.variants.model.RelationVisitor;
+import steelyard.variants.model.Subcircuit;
 import steelyard.variants.model.Table;
 import steelyard.variants.model.Tasks;
 import steelyard.variants.model.Tuples;
+import steelyard.variants.model.Views;
 
 /**
  * Posts {@code when ⇒ relation} in the engine's own form of its kind; answers false, and posts
@@ -103,6 +120,12 @@ final class RelationPosting implements RelationVisitor<Boolean> {
   }
 
   @Override
+  public Boolean absolute(Absolute relation) {
+    Views both = Views.of(relation.operand(), relation.operand().negated());
+    return maximum(new Maximum(both, relation.result()));
+  }
+
+  @Override
   public Boolean noOverlap(NoOverlap relation) {
     relations.noOverlap(tag, when, tasks(relation.tasks()));
     return true;
@@ -130,5 +153,80 @@ final class RelationPosting implements RelationVisitor<Boolean> {
     long[] sizes = relation.sizes().stream().toArray();
     relations.binPacking(tag, when, bins, sizes, places.scope(relation.loads()));
     return true;
+  }
+
+  @Override
+  public Boolean allDifferentExcept(AllDifferentExcept relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean regular(Regular relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean globalCardinality(GlobalCardinality relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean count(Count relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean distinctValues(DistinctValues relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean product(Product relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean division(Division relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean modulo(Modulo relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean lexicographic(Lexicographic relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean inverse(Inverse relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean circuit(Circuit relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean subcircuit(Subcircuit relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean noOverlap2D(NoOverlap2D relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean knapsack(Knapsack relation) {
+    return false;
+  }
+
+  @Override
+  public Boolean precedence(Precedence relation) {
+    return false;
   }
 }

@@ -1,24 +1,38 @@
 package steelyard.adapters.spi;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
+import steelyard.variants.model.Absolute;
 import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.AllDifferentExcept;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.BinPacking;
+import steelyard.variants.model.Circuit;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Conditional;
+import steelyard.variants.model.Constraint;
+import steelyard.variants.model.Count;
 import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.DistinctValues;
+import steelyard.variants.model.Division;
 import steelyard.variants.model.Element;
+import steelyard.variants.model.GlobalCardinality;
+import steelyard.variants.model.Inverse;
+import steelyard.variants.model.Knapsack;
+import steelyard.variants.model.Lexicographic;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.Maximum;
+import steelyard.variants.model.Modulo;
 import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.NoOverlap2D;
+import steelyard.variants.model.Precedence;
+import steelyard.variants.model.Product;
+import steelyard.variants.model.Regular;
 import steelyard.variants.model.Relation;
 import steelyard.variants.model.RelationVisitor;
+import steelyard.variants.model.Subcircuit;
 import steelyard.variants.model.Table;
-import steelyard.variants.model.Task;
-import steelyard.variants.model.Tasks;
 import steelyard.variants.model.Tuples;
 import steelyard.variants.model.View;
 import steelyard.variants.model.Views;
@@ -29,74 +43,72 @@ import steelyard.variants.model.Views;
  */
 public final class Decomposition implements RelationVisitor<String> {
   private final Definer definer;
-  private final List<Clause> holds = new ArrayList<>();
+  private final Conditions conditions;
+  private final Arithmetic arithmetic;
+  private final Counting counting;
+  private final Sequences sequences;
+  private final Tours tours;
+  private final Layouts layouts;
 
-  private Decomposition(Definer definer) {
-    this.definer = definer;
+  private Decomposition(Fresh fresh) {
+    definer = new Definer(fresh);
+    conditions = new Conditions(definer);
+    arithmetic = new Arithmetic(definer, conditions);
+    counting = new Counting(definer, conditions);
+    sequences = new Sequences(definer, conditions);
+    tours = new Tours(definer, conditions);
+    layouts = new Layouts(definer, conditions);
   }
 
   /** When {@code relation} holds. */
   public static Truth of(Relation relation, Fresh fresh) {
-    Definer definer = new Definer(fresh);
-    Decomposition decomposition = new Decomposition(definer);
-    String how = relation.accept(decomposition);
-    return new Truth(how, definer.definitions(), decomposition.holds);
+    Decomposition it = new Decomposition(fresh);
+    String how = relation.accept(it);
+    List<Clause> holds = it.conditions.clauses();
+    return new Truth(how, it.definer.definitions(), holds, it.conditions.implied());
   }
 
-  /** The constraint with definitions and clauses alone. */
+  /** The constraint that {@code relation} holds, in simpler ones. */
+  public static Reduction posted(Relation relation, Fresh fresh) {
+    return of(new Conditional(Atom.TRUE, Conditional.Mode.IF, relation), fresh);
+  }
+
+  /** The constraint in simpler ones. */
   public static Reduction of(Conditional constraint, Fresh fresh) {
-    Definer definer = new Definer(fresh);
-    Decomposition decomposition = new Decomposition(definer);
-    String how = constraint.then().accept(decomposition);
-    List<Clause> asserted = decomposition.under(constraint.when(), constraint.mode());
-    return new Reduction(how, definer.definitions(), asserted);
-  }
-
-  private List<Clause> under(Atom when, Conditional.Mode mode) {
-    List<Clause> asserted = new ArrayList<>();
-    if (mode != Conditional.Mode.ONLY_IF) {
-      for (Clause clause : holds) {
-        List<Atom> atoms = new ArrayList<>(List.of(when.negated()));
-        clause.atoms().stream().forEach(atoms::add);
-        definer.clause(atoms).ifPresent(asserted::add);
-      }
-    }
-    if (mode != Conditional.Mode.IF) {
-      List<Atom> atoms = new ArrayList<>(List.of(when));
-      holds.forEach(clause -> atoms.add(definer.any(clause.atoms().stream().toList()).negated()));
-      definer.clause(atoms).ifPresent(asserted::add);
-    }
-    return asserted;
-  }
-
-  private void require(Atom... atoms) {
-    require(List.of(atoms));
-  }
-
-  private void require(List<Atom> atoms) {
-    definer.clause(atoms).ifPresent(holds::add);
+    Decomposition it = new Decomposition(fresh);
+    String how = constraint.then().accept(it);
+    List<Constraint> asserted = it.conditions.under(constraint.when(), constraint.mode());
+    return new Reduction(how, it.definer.definitions(), asserted);
   }
 
   /** One literal that is true exactly where the relation holds. */
   @Override
   public String linear(Linear relation) {
-    require(definer.holds(relation.sum(), relation.op(), relation.bound()));
+    conditions.require(relation.sum(), relation.op(), relation.bound());
     return "reified by a literal";
   }
 
   @Override
   public String clause(Clause relation) {
-    require(relation.atoms().stream().toList());
+    conditions.require(relation.atoms().stream().toList());
     return "itself";
   }
 
   /** Any two views differ. */
   @Override
   public String allDifferent(AllDifferent relation) {
+    return allDifferentExcept(AllDifferentExcept.of(relation.scope()));
+  }
+
+  /** Any two views differ, or the first has an excepted value. */
+  @Override
+  public String allDifferentExcept(AllDifferentExcept relation) {
     Views scope = relation.scope();
     for (int i = 0; i < scope.size(); i++) {
+      View left = scope.get(i);
+      Atom[] excepted = relation.except().stream().mapToObj(left::is).toArray(Atom[]::new);
       for (int j = i + 1; j < scope.size(); j++) {
-        require(definer.compare(scope.get(i), Comparison.NE, scope.get(j)));
+        conditions.require(left, Comparison.NE, scope.get(j), excepted);
       }
     }
     return "pairwise disequalities (van Hoeve 2001)";
@@ -110,19 +122,12 @@ public final class Decomposition implements RelationVisitor<String> {
   public String element(Element relation) {
     View index = relation.index();
     Views array = relation.array();
-    requireWithin(index, array.size());
+    conditions.requireWithin(index, array.size());
     for (int i = 0; i < array.size(); i++) {
-      if (definer.mayBe(index.is(i))) {
-        Atom entry = definer.compare(array.get(i), Comparison.EQ, relation.result());
-        require(index.is(i).negated(), entry);
-      }
+      Atom elsewhere = index.is(i).negated();
+      conditions.require(array.get(i), Comparison.EQ, relation.result(), elsewhere);
     }
     return "implication per index (Van Hentenryck & Carillon 1988)";
-  }
-
-  private void requireWithin(View view, int size) {
-    require(view.atLeast(0));
-    require(view.atMost(size - 1L));
   }
 
   /**
@@ -135,10 +140,10 @@ public final class Decomposition implements RelationVisitor<String> {
     List<List<Atom>> rows =
         IntStream.range(0, relation.rows().size()).mapToObj(r -> row(relation, r)).toList();
     if (relation.polarity() == Table.Polarity.FORBIDDEN) {
-      rows.forEach(row -> require(row.stream().map(Atom::negated).toList()));
+      rows.forEach(row -> conditions.require(row.stream().map(Atom::negated).toList()));
       return "clause per row (Walsh 2000)";
     }
-    require(rows.stream().map(definer::all).toList());
+    conditions.require(rows.stream().map(definer::all).toList());
     return "literal per row (Bacchus 2007)";
   }
 
@@ -150,94 +155,98 @@ public final class Decomposition implements RelationVisitor<String> {
         .toList();
   }
 
-  /** The result is at least every term, and at most one of them. */
+  @Override
+  public String regular(Regular relation) {
+    return sequences.regular(relation);
+  }
+
+  @Override
+  public String globalCardinality(GlobalCardinality relation) {
+    return counting.globalCardinality(relation);
+  }
+
+  @Override
+  public String count(Count relation) {
+    return counting.count(relation);
+  }
+
+  @Override
+  public String distinctValues(DistinctValues relation) {
+    return counting.distinctValues(relation);
+  }
+
   @Override
   public String maximum(Maximum relation) {
-    List<View> terms = relation.terms().stream().toList();
-    View result = relation.result();
-    terms.forEach(term -> require(definer.compare(term, Comparison.LE, result)));
-    require(terms.stream().map(t -> definer.compare(t, Comparison.GE, result)).toList());
-    return "at least every term, at most one";
+    return arithmetic.maximum(relation);
   }
 
-  /**
-   * One disjunction for each pair of tasks: Balas (1969), "Machine Sequencing via Disjunctive
-   * Graphs", Operations Research 17(6):941-957.
-   */
+  @Override
+  public String absolute(Absolute relation) {
+    return arithmetic.absolute(relation);
+  }
+
+  @Override
+  public String product(Product relation) {
+    return arithmetic.product(relation);
+  }
+
+  @Override
+  public String division(Division relation) {
+    return arithmetic.division(relation);
+  }
+
+  @Override
+  public String modulo(Modulo relation) {
+    return arithmetic.modulo(relation);
+  }
+
+  @Override
+  public String lexicographic(Lexicographic relation) {
+    return sequences.lexicographic(relation);
+  }
+
+  @Override
+  public String inverse(Inverse relation) {
+    return tours.inverse(relation);
+  }
+
+  @Override
+  public String circuit(Circuit relation) {
+    return tours.circuit(relation);
+  }
+
+  @Override
+  public String subcircuit(Subcircuit relation) {
+    return tours.subcircuit(relation);
+  }
+
   @Override
   public String noOverlap(NoOverlap relation) {
-    List<Task> tasks = relation.tasks().asList();
-    for (int i = 0; i < tasks.size(); i++) {
-      for (int j = i + 1; j < tasks.size(); j++) {
-        Task a = tasks.get(i);
-        Task b = tasks.get(j);
-        require(
-            a.present().negated(),
-            b.present().negated(),
-            definer.compare(a.end(), Comparison.LE, b.start()),
-            definer.compare(b.end(), Comparison.LE, a.start()));
-      }
-    }
-    return "disjunction per pair (Balas 1969)";
+    return layouts.noOverlap(relation);
   }
 
-  /**
-   * Demands are not negative, so their sum is largest at the start of some task that runs: there it
-   * must fit. The task decomposition of Schutt, Feydy, Stuckey &amp; Wallace (2009), "Why
-   * Cumulative Decomposition Is Not as Bad as It Sounds", CP, LNCS 5732:746-761, section 3.
-   */
+  @Override
+  public String noOverlap2D(NoOverlap2D relation) {
+    return layouts.noOverlap2D(relation);
+  }
+
   @Override
   public String cumulative(Cumulative relation) {
-    for (int at = 0; at < relation.tasks().size(); at++) {
-      Task task = relation.tasks().get(at);
-      require(
-          task.present().negated(),
-          definer.compare(task.end(), Comparison.LE, task.start()),
-          fitsAtStartOf(at, relation));
-    }
-    return "task decomposition (Schutt et al. 2009)";
+    return layouts.cumulative(relation);
   }
 
-  /**
-   * The literal that says the demands of task {@code at} and of those that run at its start fit.
-   */
-  private Atom fitsAtStartOf(int at, Cumulative relation) {
-    Tasks tasks = relation.tasks();
-    View time = tasks.starts().get(at);
-    Sum sum = new Sum().add(1, relation.demands().get(at)).add(-1, relation.capacity());
-    for (int i = 0; i < tasks.size(); i++) {
-      if (i != at) {
-        definer.addWhere(runs(tasks.get(i), time), relation.demands().get(i), sum);
-      }
-    }
-    return definer.holds(sum.toLinearSum(), Comparison.LE, 0);
-  }
-
-  private Atom runs(Task task, View time) {
-    return definer.all(
-        List.of(
-            task.present(),
-            definer.compare(task.start(), Comparison.LE, time),
-            definer.compare(task.end(), Comparison.LE, time).negated()));
-  }
-
-  /**
-   * Every bin exists, and the sizes in each sum to its load: Shaw (2004), "A Constraint for Bin
-   * Packing", CP, LNCS 3258:648-662, section 2.
-   */
   @Override
   public String binPacking(BinPacking relation) {
-    Views bins = relation.bins();
-    bins.stream().forEach(bin -> requireWithin(bin, relation.loads().size()));
-    for (int b = 0; b < relation.loads().size(); b++) {
-      Sum sum = new Sum().add(-1, relation.loads().get(b));
-      for (int i = 0; i < bins.size(); i++) {
-        if (relation.sizes().get(i) != 0) {
-          sum.add(relation.sizes().get(i), definer.counted(bins.get(i).is(b)));
-        }
-      }
-      require(definer.holds(sum.toLinearSum(), Comparison.EQ, 0));
-    }
-    return "weighted sum per bin (Shaw 2004)";
+    return counting.binPacking(relation);
+  }
+
+  @Override
+  public String knapsack(Knapsack relation) {
+    return counting.knapsack(relation);
+  }
+
+  @Override
+  public String precedence(Precedence relation) {
+    return sequences.precedence(relation);
   }
 }

@@ -8,15 +8,17 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.stream.IntStream;
+import java.util.function.Function;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.Atoms;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Conditional;
+import steelyard.variants.model.Constraint;
 import steelyard.variants.model.Definition;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.Element;
+import steelyard.variants.model.Ints;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.LinearSum;
 import steelyard.variants.model.Relation;
@@ -47,11 +49,22 @@ final class Definer {
 
   /** The literal of {@code sum OP bound}. */
   Atom holds(LinearSum sum, Comparison op, long bound) {
-    Linear relation = Linear.of(sum, op, bound);
+    return literal(Linear.of(sum, op, bound));
+  }
+
+  /** The literal of a linear relation. */
+  Atom literal(Linear relation) {
+    return known(relation).orElseGet(() -> named(relation));
+  }
+
+  /** The literal of a linear relation if it needs no new Boolean. */
+  Optional<Atom> known(Linear relation) {
+    LinearSum sum = relation.sum();
     if (sum.size() == 1) {
-      return settled(single(sum.variable(0), sum.coefficient(0), op, relation.bound()));
+      Atom atom = single(sum.variable(0), sum.coefficient(0), relation.op(), relation.bound());
+      return Optional.of(settled(atom));
     }
-    return decided(relation).map(Atom::constant).orElseGet(() -> named(relation));
+    return decided(relation).map(Atom::constant);
   }
 
   /** The literal that says every one of {@code atoms} holds. */
@@ -61,18 +74,29 @@ final class Definer {
 
   /** The literal that says one of {@code atoms} holds. */
   Atom any(Collection<Atom> atoms) {
-    Set<Atom> open = open(atoms);
+    List<Atom> open = open(atoms);
     return switch (open.size()) {
       case 0 -> Atom.FALSE;
-      case 1 -> open.iterator().next();
+      case 1 -> open.get(0);
       default -> named(new Clause(Atoms.of(open)));
     };
   }
 
-  /** The clause without what domains decide; empty where they make it true. */
-  Optional<Clause> clause(Collection<Atom> atoms) {
-    Set<Atom> open = open(atoms);
-    return open.contains(Atom.TRUE) ? Optional.empty() : Optional.of(new Clause(Atoms.of(open)));
+  /** The literal that says the view has one of {@code values}. */
+  Atom oneOf(View view, Ints values) {
+    List<Atom> runs = new ArrayList<>();
+    int[] sorted = values.stream().filter(v -> mayBe(view.is(v))).sorted().toArray();
+    for (int from = 0, to; from < sorted.length; from = to + 1) {
+      to = from;
+      while (to + 1 < sorted.length && sorted[to + 1] == sorted[to] + 1) {
+        to++;
+      }
+      runs.add(
+          from == to
+              ? view.is(sorted[from])
+              : all(List.of(view.atLeast(sorted[from]), view.atMost(sorted[to]))));
+    }
+    return any(runs);
   }
 
   /** Whether the domain of the atom's variable leaves it open or true. */
@@ -95,68 +119,82 @@ final class Definer {
     return View.of(bit.variable());
   }
 
-  /** Adds {@code view} to {@code sum} where {@code when} holds, and nothing elsewhere. */
-  void addWhere(Atom when, View view, Sum sum) {
+  /** Adds {@code factor·view} to {@code sum} where {@code when} holds, and nothing elsewhere. */
+  void addWhere(Atom when, long factor, View view, Sum sum) {
     View bit = counted(when);
     if (bit.isConstant()) {
       if (bit.offset() == 1) {
-        sum.add(1, view);
+        sum.add(factor, view);
       }
       return;
     }
-    sum.add(view.offset(), bit);
+    sum.add(factor * view.offset(), bit);
     if (!view.isConstant()) {
-      sum.add(view.sign(), View.of(chosen(bit, view.variable())));
+      View variable = View.of(view.variable());
+      Domain domain = Domains.with(0, fresh.domain(view.variable()));
+      sum.add(factor * view.sign(), choice(bit, variable, View.constant(0), domain));
     }
   }
 
-  /** A new variable that is {@code variable} where {@code bit} is 1, and 0 elsewhere. */
-  private int chosen(View bit, int variable) {
-    int chosen = fresh.variable(withZero(fresh.domain(variable)));
-    Views array = Views.of(View.constant(0), View.of(variable));
-    definitions.add(new Definition(chosen, new Element(array, bit, View.of(chosen))));
-    return chosen;
+  /** A new variable that is {@code then} where {@code bit} is 1, else {@code otherwise}. */
+  View choice(View bit, View then, View otherwise, Domain domain) {
+    return entry(Views.of(otherwise, then), bit, domain);
   }
 
-  private static Domain withZero(Domain domain) {
-    if (domain.contains(0)) {
-      return domain;
-    }
-    int below = (int) IntStream.range(0, domain.ranges()).filter(r -> domain.to(r) < 0).count();
-    int[] bounds = new int[2 * domain.ranges() + 2];
-    for (int r = 0; r < domain.ranges(); r++) {
-      int at = 2 * (r < below ? r : r + 1);
-      bounds[at] = domain.from(r);
-      bounds[at + 1] = domain.to(r);
-    }
-    return Domain.ofRanges(bounds);
+  /** A new variable that is {@code array[index]}; the index cannot leave the array. */
+  View entry(Views array, View index, Domain domain) {
+    return defined(domain, own -> new Element(array, index, own));
+  }
+
+  /** A new variable with the total definition that {@code constraint} makes for it. */
+  View defined(Domain domain, Function<View, Constraint> constraint) {
+    int variable = fresh.variable(domain);
+    View own = View.of(variable);
+    definitions.add(new Definition(variable, constraint.apply(own)));
+    return own;
+  }
+
+  /** The values that {@code view} can take. */
+  Domain domain(View view) {
+    return view.isConstant()
+        ? Domain.of(view.offset())
+        : Domains.of(view, fresh.domain(view.variable()));
+  }
+
+  long min(View view) {
+    return switch (view.sign()) {
+      case 1 -> (long) fresh.domain(view.variable()).min() + view.offset();
+      case -1 -> (long) view.offset() - fresh.domain(view.variable()).max();
+      default -> view.offset();
+    };
+  }
+
+  long max(View view) {
+    return -min(view.negated());
   }
 
   /** A literal of a new Boolean that is true exactly where {@code relation} holds. */
   private Atom named(Relation relation) {
     return named.computeIfAbsent(
         relation,
-        r -> {
-          int bit = fresh.variable(Domain.BOOLEAN);
-          Atom holds = Atom.atLeast(bit, 1);
-          definitions.add(new Definition(bit, new Conditional(holds, Conditional.Mode.IFF, r)));
-          return holds;
-        });
+        r ->
+            defined(Domain.BOOLEAN, own -> new Conditional(own.atLeast(1), Conditional.Mode.IFF, r))
+                .atLeast(1));
   }
 
   /** The distinct atoms that domains leave open; TRUE alone where one of them is true. */
-  private Set<Atom> open(Collection<Atom> atoms) {
+  List<Atom> open(Collection<Atom> atoms) {
     Set<Atom> open = new LinkedHashSet<>();
     for (Atom atom : atoms) {
       Atom settled = settled(atom);
       if (settled.equals(Atom.TRUE)) {
-        return Set.of(Atom.TRUE);
+        return List.of(Atom.TRUE);
       }
       if (!settled.isConstant()) {
         open.add(settled);
       }
     }
-    return open;
+    return List.copyOf(open);
   }
 
   /** The atom, or a constant where the variable's domain decides it. */

@@ -2,17 +2,18 @@ package steelyard.adapters.spi;
 
 import java.util.List;
 import java.util.Objects;
-import steelyard.variants.model.Clause;
+import steelyard.variants.model.Constraint;
 import steelyard.variants.model.Definition;
 
 /**
- * A constraint said with total definitions and clauses alone.
+ * A constraint said with total definitions and simpler constraints.
  *
  * @param how the decomposition's name and published source
  * @param definitions of fresh variables, as in {@link Truth}
- * @param asserted what must hold; none where the constraint always does
+ * @param asserted what must hold, none where the constraint always does: clauses, linear relations,
+ *     what {@link Truth#implied} says, and these under a condition
  */
-public record Reduction(String how, List<Definition> definitions, List<Clause> asserted) {
+public record Reduction(String how, List<Definition> definitions, List<Constraint> asserted) {
   public Reduction {
     Objects.requireNonNull(how, "how");
     definitions = List.copyOf(definitions);

@@ -21,6 +21,13 @@ final class Sum {
     return this;
   }
 
+  /** Adds {@code factor} times {@code other}. */
+  Sum add(long factor, Sum other) {
+    constant = Math.addExact(constant, Math.multiplyExact(factor, other.constant));
+    other.coefficients.forEach((v, a) -> coefficients.merge(v, factor * a, Math::addExact));
+    return this;
+  }
+
   LinearSum toLinearSum() {
     coefficients.values().removeIf(a -> a == 0);
     int[] variables = coefficients.keySet().stream().mapToInt(v -> v).toArray();

@@ -47,6 +47,8 @@ class EngineAgreementTest {
   private static final Map<String, String> DOMAIN =
       Map.of(EngineBackend.ALL_DIFFERENT, EngineBackend.DOMAIN);
 
+  private static final int KINDS = RandomRelations.KINDS.size();
+
   @ParameterizedTest
   @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
   void findsExactlyTheSolutions_whenPosted(String kind) {
@@ -142,7 +144,7 @@ class EngineAgreementTest {
     for (long seed = 0; seed < 300; seed++) {
       RandomRelations made = new RandomRelations(5_000 + seed, 4);
       List<Constraint> all = new ArrayList<>();
-      for (long kind : new long[] {seed % 9, (seed + 4) % 9}) {
+      for (long kind : new long[] {seed % KINDS, (seed + 4) % KINDS}) {
         Relation relation = made.relation(RandomRelations.KINDS.get((int) kind));
         all.add(relation);
         durations(relation).forEach(all::add);

@@ -1,28 +1,47 @@
 package steelyard.adapters.spi;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collections;
 import java.util.List;
 import java.util.function.Supplier;
 import java.util.stream.IntStream;
 import org.apache.commons.rng.UniformRandomProvider;
 import org.apache.commons.rng.core.source64.SplitMix64;
+import org.apache.commons.rng.sampling.ArraySampler;
+import steelyard.variants.model.Absolute;
 import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.AllDifferentExcept;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.Atoms;
+import steelyard.variants.model.Automaton;
 import steelyard.variants.model.BinPacking;
+import steelyard.variants.model.Circuit;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Comparison;
+import steelyard.variants.model.Count;
 import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.DistinctValues;
+import steelyard.variants.model.Division;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.Element;
+import steelyard.variants.model.GlobalCardinality;
 import steelyard.variants.model.Ints;
+import steelyard.variants.model.Inverse;
+import steelyard.variants.model.Knapsack;
+import steelyard.variants.model.Lexicographic;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.LinearSum;
 import steelyard.variants.model.Longs;
 import steelyard.variants.model.Maximum;
+import steelyard.variants.model.Modulo;
 import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.NoOverlap2D;
+import steelyard.variants.model.Precedence;
+import steelyard.variants.model.Product;
+import steelyard.variants.model.Regular;
 import steelyard.variants.model.Relation;
+import steelyard.variants.model.Subcircuit;
 import steelyard.variants.model.Table;
 import steelyard.variants.model.Task;
 import steelyard.variants.model.Tasks;
@@ -41,12 +60,28 @@ public final class RandomRelations {
           "linear",
           "clause",
           "all-different",
+          "all-different-except",
           "element",
           "table",
+          "regular",
+          "global-cardinality",
+          "count",
+          "distinct-values",
           "maximum",
+          "absolute",
+          "product",
+          "division",
+          "modulo",
+          "lexicographic",
+          "inverse",
+          "circuit",
+          "subcircuit",
           "no-overlap",
+          "no-overlap-2d",
           "cumulative",
-          "bin-packing");
+          "bin-packing",
+          "knapsack",
+          "precedence");
 
   private final UniformRandomProvider random;
   private final List<Domain> domains;
@@ -66,12 +101,28 @@ public final class RandomRelations {
       case "linear" -> linear();
       case "clause" -> new Clause(Atoms.of(some(random.nextInt(4), this::atom)));
       case "all-different" -> new AllDifferent(views(random.nextInt(5)));
+      case "all-different-except" -> new AllDifferentExcept(views(random.nextInt(5)), values(3));
       case "element" -> new Element(views(random.nextInt(5)), view(), view());
       case "table" -> table();
+      case "regular" -> new Regular(views(random.nextInt(5)), automaton());
+      case "global-cardinality" -> globalCardinality();
+      case "count" -> new Count(views(random.nextInt(5)), values(4), comparison(), view());
+      case "distinct-values" -> new DistinctValues(views(random.nextInt(5)), comparison(), view());
       case "maximum" -> new Maximum(views(1 + random.nextInt(4)), view());
+      case "absolute" -> new Absolute(view(), view());
+      case "product" -> new Product(view(), view(), view());
+      case "division" -> new Division(view(), view(), view());
+      case "modulo" -> new Modulo(view(), view(), view());
+      case "lexicographic" -> lexicographic(random.nextInt(4));
+      case "inverse" -> new Inverse(views(random.nextInt(4)), views(random.nextInt(5)));
+      case "circuit" -> new Circuit(nodes(random.nextInt(5)));
+      case "subcircuit" -> new Subcircuit(nodes(random.nextInt(5)));
       case "no-overlap" -> new NoOverlap(tasks(random.nextInt(4)));
+      case "no-overlap-2d" -> noOverlap2D(random.nextInt(4));
       case "cumulative" -> cumulative(random.nextInt(4));
       case "bin-packing" -> binPacking(random.nextInt(5), random.nextInt(4));
+      case "knapsack" -> knapsack(random.nextInt(4));
+      case "precedence" -> new Precedence(views(random.nextInt(6)), values(4));
       default -> throw new IllegalArgumentException(kind);
     };
   }
@@ -104,8 +155,62 @@ public final class RandomRelations {
       long size = unit ? 1 : between(1, 4);
       factors[i] = random.nextBoolean() ? size : -size;
     }
-    Comparison op = pick(List.of(Comparison.values()));
-    return new Linear(new LinearSum(Ints.of(scope), Longs.of(factors), 0), op, between(-6, 8));
+    return new Linear(
+        new LinearSum(Ints.of(scope), Longs.of(factors), 0), comparison(), between(-6, 8));
+  }
+
+  private Comparison comparison() {
+    return pick(List.of(Comparison.values()));
+  }
+
+  /** Some of the values -1..3, in any order. */
+  private Ints values(int most) {
+    int[] values = IntStream.rangeClosed(-1, 3).toArray();
+    ArraySampler.shuffle(random, values);
+    return Ints.of(Arrays.copyOf(values, random.nextInt(most + 1)));
+  }
+
+  private Automaton automaton() {
+    int states = 1 + random.nextInt(3);
+    List<int[]> transitions = new ArrayList<>();
+    for (int state = 0; state < states; state++) {
+      for (int value = -1; value < 4; value++) {
+        if (random.nextInt(3) > 0) {
+          transitions.add(new int[] {state, value, random.nextInt(states)});
+        }
+      }
+    }
+    Ints accepting =
+        Ints.of(IntStream.range(0, states).filter(q -> random.nextBoolean()).toArray());
+    return new Automaton(states, random.nextInt(states), accepting, Tuples.of(3, transitions));
+  }
+
+  private Relation globalCardinality() {
+    Ints values = values(3);
+    GlobalCardinality.Others others = pick(List.of(GlobalCardinality.Others.values()));
+    return new GlobalCardinality(views(random.nextInt(5)), values, views(values.size()), others);
+  }
+
+  private Relation lexicographic(int size) {
+    return new Lexicographic(views(size), views(size), pick(List.of(Lexicographic.Ties.values())));
+  }
+
+  /** Mostly views of nodes, so that some of the relations hold. */
+  private Views nodes(int size) {
+    return Views.of(
+        some(size, () -> random.nextInt(4) == 0 ? View.constant(random.nextInt(size)) : view()));
+  }
+
+  private Relation noOverlap2D(int boxes) {
+    return new NoOverlap2D(tasks(boxes), tasks(boxes));
+  }
+
+  private Relation knapsack(int items) {
+    return new Knapsack(views(items), longs(items), view(), longs(items), view());
+  }
+
+  private Longs longs(int size) {
+    return Longs.of(IntStream.range(0, size).mapToLong(i -> between(-2, 4)).toArray());
   }
 
   private Relation table() {

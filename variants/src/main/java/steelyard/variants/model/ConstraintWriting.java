@@ -69,6 +69,26 @@ final class ConstraintWriting implements RelationVisitor<Void> {
     longs.stream().forEach(out::add);
   }
 
+  private void ints(Ints ints) {
+    out.add(ints.size());
+    ints.stream().forEach(out::add);
+  }
+
+  private void tuples(Tuples rows) {
+    out.add(rows.size()).add(rows.arity());
+    for (int row = 0; row < rows.size(); row++) {
+      for (int column = 0; column < rows.arity(); column++) {
+        out.add(rows.get(row, column));
+      }
+    }
+  }
+
+  private void automaton(Automaton automaton) {
+    out.add(automaton.states()).add(automaton.start());
+    ints(automaton.accepting());
+    tuples(automaton.transitions());
+  }
+
   private void tasks(Tasks tasks) {
     views(tasks.starts());
     views(tasks.durations());
@@ -106,13 +126,8 @@ final class ConstraintWriting implements RelationVisitor<Void> {
   @Override
   public Void table(Table relation) {
     views(relation.scope());
-    Tuples rows = relation.rows();
-    out.add(relation.polarity().name()).add(rows.size()).add(rows.arity());
-    for (int row = 0; row < rows.size(); row++) {
-      for (int column = 0; column < rows.arity(); column++) {
-        out.add(rows.get(row, column));
-      }
-    }
+    out.add(relation.polarity().name());
+    tuples(relation.rows());
     return null;
   }
 
@@ -142,6 +157,128 @@ final class ConstraintWriting implements RelationVisitor<Void> {
     views(relation.bins());
     longs(relation.sizes());
     views(relation.loads());
+    return null;
+  }
+
+  @Override
+  public Void allDifferentExcept(AllDifferentExcept relation) {
+    views(relation.scope());
+    ints(relation.except());
+    return null;
+  }
+
+  @Override
+  public Void regular(Regular relation) {
+    views(relation.word());
+    automaton(relation.automaton());
+    return null;
+  }
+
+  @Override
+  public Void globalCardinality(GlobalCardinality relation) {
+    views(relation.scope());
+    ints(relation.values());
+    views(relation.counts());
+    out.add(relation.others().name());
+    return null;
+  }
+
+  @Override
+  public Void count(Count relation) {
+    views(relation.scope());
+    ints(relation.values());
+    out.add(relation.op().name());
+    view(relation.bound());
+    return null;
+  }
+
+  @Override
+  public Void distinctValues(DistinctValues relation) {
+    views(relation.scope());
+    out.add(relation.op().name());
+    view(relation.bound());
+    return null;
+  }
+
+  @Override
+  public Void absolute(Absolute relation) {
+    view(relation.operand());
+    view(relation.result());
+    return null;
+  }
+
+  @Override
+  public Void product(Product relation) {
+    view(relation.left());
+    view(relation.right());
+    view(relation.result());
+    return null;
+  }
+
+  @Override
+  public Void division(Division relation) {
+    view(relation.dividend());
+    view(relation.divisor());
+    view(relation.quotient());
+    return null;
+  }
+
+  @Override
+  public Void modulo(Modulo relation) {
+    view(relation.dividend());
+    view(relation.divisor());
+    view(relation.remainder());
+    return null;
+  }
+
+  @Override
+  public Void lexicographic(Lexicographic relation) {
+    views(relation.left());
+    views(relation.right());
+    out.add(relation.ties().name());
+    return null;
+  }
+
+  @Override
+  public Void inverse(Inverse relation) {
+    views(relation.forward());
+    views(relation.backward());
+    return null;
+  }
+
+  @Override
+  public Void circuit(Circuit relation) {
+    views(relation.successors());
+    return null;
+  }
+
+  @Override
+  public Void subcircuit(Subcircuit relation) {
+    views(relation.successors());
+    return null;
+  }
+
+  @Override
+  public Void noOverlap2D(NoOverlap2D relation) {
+    tasks(relation.across());
+    tasks(relation.up());
+    return null;
+  }
+
+  @Override
+  public Void knapsack(Knapsack relation) {
+    views(relation.amounts());
+    longs(relation.weights());
+    view(relation.capacity());
+    longs(relation.profits());
+    view(relation.profit());
+    return null;
+  }
+
+  @Override
+  public Void precedence(Precedence relation) {
+    views(relation.scope());
+    ints(relation.values());
     return null;
   }
 }

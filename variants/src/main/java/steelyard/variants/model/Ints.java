@@ -44,6 +44,22 @@ public final class Ints {
     return new Ints(moved);
   }
 
+  int compareRows(int i, int j) {
+    return Integer.compare(values[i], values[j]);
+  }
+
+  /**
+   * Makes sure that these are values of variables, none of them twice.
+   *
+   * @param what a name for one of them
+   */
+  void requireDistinctValues(String what) {
+    stream().forEach(Domain::requireValue);
+    if (stream().distinct().count() != values.length) {
+      throw new IllegalArgumentException(what + " twice: " + this);
+    }
+  }
+
   /** Every variable id replaced by what {@code rewriting} makes of it. */
   Ints mapped(Rewriting rewriting) {
     int[] mapped = new int[values.length];

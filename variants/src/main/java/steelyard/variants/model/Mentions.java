@@ -119,4 +119,115 @@ public final class Mentions implements RelationVisitor<Void> {
     of(relation.loads());
     return null;
   }
+
+  @Override
+  public Void allDifferentExcept(AllDifferentExcept relation) {
+    of(relation.scope());
+    return null;
+  }
+
+  @Override
+  public Void regular(Regular relation) {
+    of(relation.word());
+    return null;
+  }
+
+  @Override
+  public Void globalCardinality(GlobalCardinality relation) {
+    of(relation.scope());
+    of(relation.counts());
+    return null;
+  }
+
+  @Override
+  public Void count(Count relation) {
+    of(relation.scope());
+    view(relation.bound());
+    return null;
+  }
+
+  @Override
+  public Void distinctValues(DistinctValues relation) {
+    of(relation.scope());
+    view(relation.bound());
+    return null;
+  }
+
+  @Override
+  public Void absolute(Absolute relation) {
+    view(relation.operand());
+    view(relation.result());
+    return null;
+  }
+
+  @Override
+  public Void product(Product relation) {
+    view(relation.left());
+    view(relation.right());
+    view(relation.result());
+    return null;
+  }
+
+  @Override
+  public Void division(Division relation) {
+    view(relation.dividend());
+    view(relation.divisor());
+    view(relation.quotient());
+    return null;
+  }
+
+  @Override
+  public Void modulo(Modulo relation) {
+    view(relation.dividend());
+    view(relation.divisor());
+    view(relation.remainder());
+    return null;
+  }
+
+  @Override
+  public Void lexicographic(Lexicographic relation) {
+    of(relation.left());
+    of(relation.right());
+    return null;
+  }
+
+  @Override
+  public Void inverse(Inverse relation) {
+    of(relation.forward());
+    of(relation.backward());
+    return null;
+  }
+
+  @Override
+  public Void circuit(Circuit relation) {
+    of(relation.successors());
+    return null;
+  }
+
+  @Override
+  public Void subcircuit(Subcircuit relation) {
+    of(relation.successors());
+    return null;
+  }
+
+  @Override
+  public Void noOverlap2D(NoOverlap2D relation) {
+    tasks(relation.across());
+    tasks(relation.up());
+    return null;
+  }
+
+  @Override
+  public Void knapsack(Knapsack relation) {
+    of(relation.amounts());
+    view(relation.capacity());
+    view(relation.profit());
+    return null;
+  }
+
+  @Override
+  public Void precedence(Precedence relation) {
+    of(relation.scope());
+    return null;
+  }
 }

@@ -8,12 +8,28 @@ public sealed interface Relation extends Constraint
     permits Linear,
         Clause,
         AllDifferent,
+        AllDifferentExcept,
         Element,
         Table,
+        Regular,
+        GlobalCardinality,
+        Count,
+        DistinctValues,
         Maximum,
+        Absolute,
+        Product,
+        Division,
+        Modulo,
+        Lexicographic,
+        Inverse,
+        Circuit,
+        Subcircuit,
         NoOverlap,
+        NoOverlap2D,
         Cumulative,
-        BinPacking {
+        BinPacking,
+        Knapsack,
+        Precedence {
 
   <R> R accept(RelationVisitor<R> visitor);
 

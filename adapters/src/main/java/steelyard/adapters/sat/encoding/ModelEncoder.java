@@ -11,7 +11,6 @@ import steelyard.adapters.spi.Decomposition;
 import steelyard.adapters.spi.Fresh;
 import steelyard.adapters.spi.Reduction;
 import steelyard.adapters.spi.Sizes;
-import steelyard.adapters.spi.Truth;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Conditional;
 import steelyard.variants.model.Constraint;
@@ -148,9 +147,9 @@ public final class ModelEncoder {
       Optional<Set<String>> names = relation.accept(relations);
       names.ifPresent(all -> all.forEach(name -> used(relation, name)));
       if (names.isEmpty()) {
-        Truth truth = Decomposition.of(relation, fresh);
-        used(relation, truth.how());
-        encode(truth.definitions(), truth.holds());
+        Reduction reduction = Decomposition.posted(relation, fresh);
+        used(relation, reduction.how());
+        encode(reduction);
       }
     }
   }
@@ -166,7 +165,7 @@ public final class ModelEncoder {
     } else {
       Reduction reduction = Decomposition.of(conditional, fresh);
       used(then, "conditional: " + reduction.how());
-      encode(reduction.definitions(), reduction.asserted());
+      encode(reduction);
     }
   }
 
@@ -192,12 +191,12 @@ public final class ModelEncoder {
     }
   }
 
-  private void encode(Iterable<Definition> definitions, Iterable<Clause> clauses) {
-    for (Definition definition : definitions) {
+  private void encode(Reduction reduction) {
+    for (Definition definition : reduction.definitions()) {
       integers.add(definition.variable(), fresh.domain(definition.variable()));
       encode(definition.constraint());
     }
-    clauses.forEach(clause -> relations.anyOf(clause).end());
+    reduction.asserted().forEach(this::encode);
   }
 
   private void used(Relation relation, String name) {

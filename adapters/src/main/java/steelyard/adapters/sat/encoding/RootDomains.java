@@ -10,27 +10,44 @@ import java.util.function.BooleanSupplier;
 import java.util.function.IntConsumer;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
+import steelyard.variants.model.Absolute;
 import steelyard.variants.model.AllDifferent;
+import steelyard.variants.model.AllDifferentExcept;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.BinPacking;
+import steelyard.variants.model.Circuit;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Conditional;
 import steelyard.variants.model.Constraint;
+import steelyard.variants.model.Count;
 import steelyard.variants.model.Cumulative;
+import steelyard.variants.model.DistinctValues;
+import steelyard.variants.model.Division;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.Element;
+import steelyard.variants.model.GlobalCardinality;
+import steelyard.variants.model.Inverse;
+import steelyard.variants.model.Knapsack;
+import steelyard.variants.model.Lexicographic;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.LinearSum;
 import steelyard.variants.model.Maximum;
 import steelyard.variants.model.Model;
+import steelyard.variants.model.Modulo;
 import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.NoOverlap2D;
 import steelyard.variants.model.Posting;
+import steelyard.variants.model.Precedence;
+import steelyard.variants.model.Product;
+import steelyard.variants.model.Regular;
 import steelyard.variants.model.Relation;
 import steelyard.variants.model.RelationVisitor;
+import steelyard.variants.model.Subcircuit;
 import steelyard.variants.model.Table;
 import steelyard.variants.model.Tuples;
 import steelyard.variants.model.View;
+import steelyard.variants.model.Views;
 
 /**
  * Domains without values that no solution takes, found before encoding because the order encoding
@@ -124,6 +141,12 @@ final class RootDomains implements RelationVisitor<Void> {
   }
 
   @Override
+  public Void absolute(Absolute relation) {
+    Views both = Views.of(relation.operand(), relation.operand().negated());
+    return maximum(new Maximum(both, relation.result()));
+  }
+
+  @Override
   public Void element(Element relation) {
     within(relation.index(), relation.array().size());
     if (relation.isConstantArray()) {
@@ -169,6 +192,87 @@ final class RootDomains implements RelationVisitor<Void> {
 
   @Override
   public Void cumulative(Cumulative relation) {
+    return null;
+  }
+
+  @Override
+  public Void allDifferentExcept(AllDifferentExcept relation) {
+    return null;
+  }
+
+  @Override
+  public Void regular(Regular relation) {
+    return null;
+  }
+
+  @Override
+  public Void globalCardinality(GlobalCardinality relation) {
+    if (relation.others() == GlobalCardinality.Others.FORBIDDEN) {
+      relation.scope().stream().forEach(view -> bounds.keep(view, relation.values().stream()));
+    }
+    return null;
+  }
+
+  @Override
+  public Void count(Count relation) {
+    return null;
+  }
+
+  @Override
+  public Void distinctValues(DistinctValues relation) {
+    return null;
+  }
+
+  @Override
+  public Void product(Product relation) {
+    return null;
+  }
+
+  @Override
+  public Void division(Division relation) {
+    return null;
+  }
+
+  @Override
+  public Void modulo(Modulo relation) {
+    return null;
+  }
+
+  @Override
+  public Void lexicographic(Lexicographic relation) {
+    return null;
+  }
+
+  @Override
+  public Void inverse(Inverse relation) {
+    relation.forward().stream().forEach(view -> within(view, relation.backward().size()));
+    return null;
+  }
+
+  @Override
+  public Void circuit(Circuit relation) {
+    relation.successors().stream().forEach(view -> within(view, relation.successors().size()));
+    return null;
+  }
+
+  @Override
+  public Void subcircuit(Subcircuit relation) {
+    relation.successors().stream().forEach(view -> within(view, relation.successors().size()));
+    return null;
+  }
+
+  @Override
+  public Void noOverlap2D(NoOverlap2D relation) {
+    return null;
+  }
+
+  @Override
+  public Void knapsack(Knapsack relation) {
+    return null;
+  }
+
+  @Override
+  public Void precedence(Precedence relation) {
     return null;
   }
 
