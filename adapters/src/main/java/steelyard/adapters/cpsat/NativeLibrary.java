@@ -18,20 +18,26 @@ final class NativeLibrary {
       // The loader is silent where it cannot unpack: only a native call tells.
       new SolveWrapper().delete();
       return Optional.empty();
-    } catch (UnsatisfiedLinkError | RuntimeException e) {
+    } catch (LinkageError | RuntimeException e) {
       return Optional.of(
           "cpsat cannot load the native library jniortools for "
               + System.getProperty("os.name")
               + " "
               + System.getProperty("os.arch")
               + " ("
-              + firstLine(e)
+              + reason(e)
               + "): put the ortools platform jar of that system on the class path and leave 150 MB"
               + " in java.io.tmpdir, or give its unpacked folder as -Djava.library.path");
     }
   }
 
-  private static String firstLine(Throwable e) {
-    return e.toString().lines().findFirst().orElse(e.getClass().getName());
+  /** The root cause's first line; the loader names an object of the JVM's, which tells nothing. */
+  private static String reason(Throwable thrown) {
+    Throwable root = thrown;
+    while (root.getCause() != null) {
+      root = root.getCause();
+    }
+    String said = root.getMessage() == null ? root.getClass().getSimpleName() : root.getMessage();
+    return said.lines().findFirst().orElse("").replaceFirst(" in ClassLoader .*", "");
   }
 }

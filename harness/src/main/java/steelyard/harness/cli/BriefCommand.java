@@ -1,5 +1,6 @@
 package steelyard.harness.cli;
 
+import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -47,12 +48,11 @@ final class BriefCommand implements Callable<Integer> {
       Sweep sweep = find(ledger);
       Briefs briefs = new Briefs(ledger, shared.folder());
       Facts facts = briefs.facts(sweep);
+      PrintWriter out = spec.commandLine().getOut();
+      out.println((json ? JsonPage.json(facts) : TextPage.text(facts)).stripTrailing());
       Path page = briefs.write(sweep, facts);
-      if (json) {
-        spec.commandLine().getOut().println(JsonPage.json(facts).stripTrailing());
-      } else {
-        spec.commandLine().getOut().println(TextPage.text(facts).stripTrailing());
-        spec.commandLine().getOut().println("\nThe page: " + page);
+      if (!json) {
+        out.println("\nThe page: " + page);
       }
       return facts.trust().isSound() ? ExitStatus.OK : ExitStatus.FINDING;
     }

@@ -51,7 +51,7 @@ final class Briefs {
       Files.write(beside, choices.toJson().getBytes(StandardCharsets.UTF_8));
       Files.move(beside, file, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
     } catch (IOException e) {
-      throw new HarnessProblem("cannot write " + file + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot write " + file, e);
     }
   }
 
@@ -156,7 +156,7 @@ final class Briefs {
       JsonPage.write(facts, into.resolve("brief.json"));
       return page;
     } catch (IOException e) {
-      throw new HarnessProblem("cannot write the brief to " + into + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot write the brief to " + into, e);
     }
   }
 }

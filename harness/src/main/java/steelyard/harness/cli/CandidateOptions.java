@@ -1,5 +1,6 @@
 package steelyard.harness.cli;
 
+import java.time.Duration;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -73,6 +74,14 @@ final class CandidateOptions {
   String wall;
 
   @Option(
+      names = "--build",
+      paramLabel = "TIME",
+      defaultValue = "60s",
+      description =
+          "Limit on reading the instance and building its model. Default: ${DEFAULT-VALUE}")
+  String build;
+
+  @Option(
       names = "--work",
       paramLabel = "AMOUNT",
       description = "Work limit in a unit of the backend, such as '10000 conflicts'.")
@@ -109,6 +118,7 @@ final class CandidateOptions {
         goal,
         seed,
         Optional.empty(),
+        Duration.ofNanos((long) (quantity("--build", () -> Quantities.seconds(build)) * 1e9)),
         technology.heapShare());
   }
 

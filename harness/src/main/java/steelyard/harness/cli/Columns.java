@@ -1,6 +1,7 @@
 package steelyard.harness.cli;
 
 import java.io.PrintWriter;
+import java.util.Locale;
 import steelyard.adapters.spi.Setting;
 
 /** Text for a terminal of 80 columns. */
@@ -27,6 +28,17 @@ final class Columns {
     return whole
         ? (long) setting.low() + ".." + (long) setting.high()
         : setting.low() + ".." + setting.high();
+  }
+
+  /** A duration in the unit that suits it. */
+  static String duration(double seconds) {
+    if (seconds < 100) {
+      return String.format(Locale.ROOT, "%.0f s", seconds);
+    }
+    double minutes = seconds / 60;
+    return minutes < 100
+        ? String.format(Locale.ROOT, "%.0f min", minutes)
+        : String.format(Locale.ROOT, "%.1f h", minutes / 60);
   }
 
   /** Text that is shown as it is: control characters could drive the terminal. */

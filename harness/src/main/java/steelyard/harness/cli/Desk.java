@@ -45,7 +45,7 @@ final class Desk implements AutoCloseable {
     try {
       return new Desk(Installation.here().with(familyJars), CacheFolder.here());
     } catch (IOException e) {
-      throw new HarnessProblem("cannot prepare the cache folder: " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot prepare the cache folder", e);
     }
   }
 
@@ -84,7 +84,7 @@ final class Desk implements AutoCloseable {
     try {
       return CoreLeases.on(crew.cache(), facts.topology());
     } catch (IOException e) {
-      throw new HarnessProblem("cannot lease cores: " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot lease cores", e);
     }
   }
 

@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -40,6 +41,8 @@ import steelyard.results.ledger.RunRecord;
     footerHeading = "%nExamples:%n",
     footer = {"  steelyard rerun 3fa2"})
 final class RerunCommand implements Callable<Integer> {
+  private static final Duration BUILD = Duration.ofMinutes(1);
+
   @Mixin private Shared shared;
   @Spec private CommandSpec spec;
 
@@ -90,6 +93,7 @@ final class RerunCommand implements Callable<Integer> {
         before.conditions().goal(),
         before.conditions().seed(),
         before.model().map(ModelFacts::plainCanonical),
+        BUILD,
         backend.heapShare());
   }
 

@@ -25,6 +25,7 @@ import steelyard.harness.sweep.BriefChoices;
 import steelyard.harness.sweep.Plan;
 import steelyard.harness.sweep.Sweep;
 import steelyard.harness.sweep.SweepFile;
+import steelyard.harness.sweep.text.Phrases;
 import steelyard.results.brief.Facts;
 import steelyard.results.brief.page.TextPage;
 import steelyard.results.ledger.Holder;
@@ -66,11 +67,11 @@ final class SweepCommand implements Callable<Integer> {
       err.println(
           String.format(
               Locale.ROOT,
-              "%d candidates, %d instances, %d runs; %.1f hours at worst",
-              size.candidates(),
-              size.instances(),
-              size.runs(),
-              size.hoursAtWorst()));
+              "%s, %s, %s; %s at worst",
+              Phrases.count(size.candidates(), "candidate"),
+              Phrases.count(size.instances(), "instance"),
+              Phrases.count(size.runs(), "run"),
+              Columns.duration(size.hoursAtWorst() * 3600)));
       Holder holder =
           new Holder(
               ProcessHandle.current().pid(), "sweep " + sweep.name(), desk.clock().instant());
@@ -84,8 +85,7 @@ final class SweepCommand implements Callable<Integer> {
     try {
       Files.createDirectories(shared.folder());
     } catch (IOException e) {
-      throw new HarnessProblem(
-          "cannot make the ledger's folder " + shared.folder() + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot make the ledger's folder " + shared.folder(), e);
     }
     return shared.file();
   }
@@ -96,7 +96,8 @@ final class SweepCommand implements Callable<Integer> {
     ledger.sessions().add(session);
     CoreLeases leases = desk.leases(machine);
     Crew crew = desk.crew();
-    ModelFactsFinder finder = new ModelFactsFinder(crew, ModelFactsFinder.in(ledger.models()));
+    ModelFactsFinder finder =
+        new ModelFactsFinder(crew, ModelFactsFinder.in(ledger.models()), plan.sweep().build());
     steelyard.results.ledger.Sweep sweep;
     try (Telling telling = Telling.on(err, quiet)) {
       KeyedPlan keyed =
@@ -119,8 +120,8 @@ final class SweepCommand implements Callable<Integer> {
     }
     Briefs briefs = new Briefs(ledger, shared.folder());
     Facts facts = briefs.facts(sweep);
-    Path page = briefs.write(sweep, facts);
     out.println(TextPage.text(facts).stripTrailing());
+    Path page = briefs.write(sweep, facts);
     out.println("\nThe page: " + page);
     OptionalInt signal = desk.signalStatus();
     return signal.orElse(facts.trust().isSound() ? ExitStatus.OK : ExitStatus.FINDING);
@@ -130,7 +131,7 @@ final class SweepCommand implements Callable<Integer> {
     try {
       return Files.readString(file);
     } catch (IOException e) {
-      throw new HarnessProblem("cannot read " + file + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot read " + file, e);
     }
   }
 }

@@ -79,7 +79,7 @@ final class CodeDigests {
           collectJar(place, prefixes, entries);
         }
       } catch (IOException e) {
-        throw new HarnessProblem("cannot read " + place + ": " + e.getMessage(), e);
+        throw HarnessProblem.of("cannot read " + place, e);
       }
     }
     entries.forEach((name, bytes) -> digester.add(name).add(bytes));
@@ -114,7 +114,7 @@ final class CodeDigests {
     try {
       digester.add(Files.readAllBytes(file));
     } catch (IOException e) {
-      throw new HarnessProblem("cannot read " + file + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot read " + file, e);
     }
   }
 }

@@ -6,9 +6,11 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.UUID;
@@ -83,7 +85,7 @@ public final class Crew {
    */
   public WorkerEnd perform(WorkerTask task, Consumer<StampedEvent> heard) {
     RunningProcess child = start(task);
-    Tail tail = new Tail(task.folder().resolve(Wire.EVENTS), heard);
+    Tail tail = new Tail(task, heard);
     Exit exit = new Watch(child, task.limits(), tail::newMarks, stop).await();
     tail.newMarks();
     return new WorkerEnd(child.startNanos(), exit, tail.events, tail.tail.forged());
@@ -105,7 +107,7 @@ public final class Crew {
               .withhold(JavaCommand.WITHHELD)
               .on(task.cores()));
     } catch (IOException e) {
-      throw new HarnessProblem("cannot start a worker: " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot start a worker", e);
     }
   }
 
@@ -170,7 +172,7 @@ public final class Crew {
           ? Optional.empty()
           : Optional.of(new NativeCache(cache).unpacked(jar.get(), start + architecture));
     } catch (IOException e) {
-      throw new HarnessProblem("cannot unpack native libraries: " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot unpack native libraries", e);
     }
   }
 
@@ -186,11 +188,14 @@ public final class Crew {
   /** Follows the events of one worker. */
   private static final class Tail {
     private final EventTail tail;
+    private final Set<String> phases;
     private final Consumer<StampedEvent> heard;
     private final List<StampedEvent> events = new ArrayList<>();
 
-    Tail(Path file, Consumer<StampedEvent> heard) {
-      this.tail = new EventTail(file);
+    Tail(WorkerTask task, Consumer<StampedEvent> heard) {
+      this.tail = new EventTail(task.folder().resolve(Wire.EVENTS));
+      this.phases = new HashSet<>(Phases.ALL);
+      this.phases.addAll(task.limits().allowances().keySet());
       this.heard = heard;
     }
 
@@ -200,7 +205,7 @@ public final class Crew {
         for (StampedEvent stamped : tail.next()) {
           events.add(stamped);
           heard.accept(stamped);
-          if (stamped.event() instanceof Event.Phase phase && Phases.ALL.contains(phase.name())) {
+          if (stamped.event() instanceof Event.Phase phase && phases.contains(phase.name())) {
             marks.add(new PhaseMark(phase.name(), stamped.nanos()));
           }
         }

@@ -59,7 +59,7 @@ public final class Describing {
     try {
       return crew.cache().folder("catalogues").resolve(digester.digest().hex() + ".json");
     } catch (IOException e) {
-      throw new HarnessProblem("cannot write to the cache folder: " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot write to the cache folder", e);
     }
   }
 

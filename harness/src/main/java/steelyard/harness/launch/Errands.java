@@ -27,7 +27,7 @@ public final class Errands {
     try {
       return Files.createTempDirectory("steelyard-errand");
     } catch (IOException e) {
-      throw new HarnessProblem("cannot make a temporary folder: " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot make a temporary folder", e);
     }
   }
 
@@ -35,7 +35,7 @@ public final class Errands {
     try {
       Folders.delete(folder);
     } catch (IOException e) {
-      throw new HarnessProblem("cannot remove " + folder + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot remove " + folder, e);
     }
   }
 }

@@ -8,11 +8,16 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import steelyard.harness.process.Exit;
+import steelyard.harness.process.ProcessLimits;
 import steelyard.harness.worker.Event;
+import steelyard.harness.worker.Phases;
 import steelyard.harness.worker.Wire;
 import steelyard.results.ledger.Digest;
 import steelyard.results.ledger.ModelFacts;
@@ -29,12 +34,13 @@ public final class ModelFactsFinder {
   /** Recipes built by one worker; its start is spread over them. */
   private static final int BATCH = 64;
 
-  private static final Duration PER_MODEL = Duration.ofSeconds(30);
+  private static final Duration START = Duration.ofSeconds(30);
   private static final long MEMORY_BYTES = 2L << 30;
   private static final double HEAP_SHARE = 0.7;
 
   private final Crew crew;
   private final Memory memory;
+  private final Duration perModel;
 
   /** Where facts are remembered. */
   public interface Memory {
@@ -43,9 +49,15 @@ public final class ModelFactsFinder {
     void remember(RecipeKey key, Models.Memo memo);
   }
 
-  public ModelFactsFinder(Crew crew, Memory memory) {
+  /**
+   * A finder.
+   *
+   * @param perModel what reading an instance and building its model may take
+   */
+  public ModelFactsFinder(Crew crew, Memory memory, Duration perModel) {
     this.crew = crew;
     this.memory = memory;
+    this.perModel = perModel;
   }
 
   /**
@@ -96,9 +108,7 @@ public final class ModelFactsFinder {
       }
       Recipe culprit = left.get(built.size());
       String reason =
-          end.last(Event.Failure.class)
-              .map(Event.Failure::message)
-              .orElseGet(() -> "building the model failed: " + end.howItEnded());
+          end.last(Event.Failure.class).map(Event.Failure::message).orElseGet(() -> failure(end));
       Models.Memo failed = Models.Memo.failed(reason);
       // What a limit or a crash ended may go well another time: it is not remembered.
       if (end.last(Event.Failure.class).isPresent()) {
@@ -107,6 +117,15 @@ public final class ModelFactsFinder {
       known.put(culprit.key(), failed);
       left.subList(0, built.size() + 1).clear();
     }
+  }
+
+  private String failure(WorkerEnd end) {
+    return end.exit().reason().equals(Optional.of(Exit.Reason.PHASE))
+        ? String.format(
+            Locale.ROOT,
+            "its family took more than %.1f s to read and build it",
+            perModel.toMillis() / 1e3)
+        : "building the model failed: " + end.howItEnded();
   }
 
   private WorkerTask task(Path folder, List<Recipe> recipes) {
@@ -125,7 +144,23 @@ public final class ModelFactsFinder {
         HEAP_SHARE,
         1,
         List.of(),
-        Crew.service(PER_MODEL.multipliedBy(Math.max(1, recipes.size() / 4)), MEMORY_BYTES));
+        limits(recipes.size()));
+  }
+
+  /** A clock for each model, so that one that hangs is known within its own allowance. */
+  private ProcessLimits limits(int models) {
+    SortedMap<String, Duration> allowances = new TreeMap<>();
+    for (int i = 0; i < models; i++) {
+      allowances.put(Phases.build(i), perModel);
+    }
+    return new ProcessLimits(
+        START,
+        Set.of(ProcessLimits.START),
+        ProcessLimits.DEFAULT_GRACE,
+        allowances,
+        START,
+        MEMORY_BYTES,
+        ProcessLimits.DEFAULT_OUTPUT_BYTES);
   }
 
   private void remember(Recipe recipe, Event.Built.Facts facts, Map<RecipeKey, Models.Memo> known) {

@@ -5,6 +5,7 @@ import java.util.Optional;
 import java.util.stream.Stream;
 import steelyard.harness.process.Exit;
 import steelyard.harness.worker.Event;
+import steelyard.harness.worker.Phases;
 import steelyard.harness.worker.StampedEvent;
 
 /**
@@ -51,7 +52,10 @@ public record WorkerEnd(long startNanos, Exit exit, List<StampedEvent> events, l
       return switch (exit.reason().get()) {
         case WALL -> "it was still running at its limit";
         case MEMORY -> "it held more memory than allowed";
-        case PHASE -> "it took too long in phase '" + exit.phase() + "'";
+        case PHASE ->
+            exit.phase().startsWith(Phases.BUILD)
+                ? "reading the instance or building the model took longer than allowed"
+                : "it took too long in phase '" + exit.phase() + "'";
         case STOPPED -> "it was stopped";
       };
     }

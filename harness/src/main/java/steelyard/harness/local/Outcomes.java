@@ -115,12 +115,16 @@ final class Outcomes {
     return new Ended(ending, failure.message());
   }
 
-  private static Ending ending(SolveOutcome.Why why) {
+  private Ending ending(SolveOutcome.Why why) {
     return switch (why) {
       case EXHAUSTED -> Ending.COMPLETED;
       case WALL -> Ending.TIME_LIMIT;
       case WORK -> Ending.WORK_LIMIT;
-      case STOPPED -> Ending.STOPPED;
+      // A solver knows only that it was asked to stop; who asked, and why, the harness knows.
+      case STOPPED ->
+          end.exit().reason().equals(Optional.of(Exit.Reason.WALL))
+              ? Ending.TIME_LIMIT
+              : Ending.STOPPED;
       case REFUSED -> Ending.UNSUPPORTED;
     };
   }

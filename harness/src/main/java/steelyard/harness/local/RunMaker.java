@@ -39,8 +39,6 @@ public final class RunMaker {
   /** Start and load of a worker may take this long, wherever the limit of the run lies. */
   private static final Duration START = Duration.ofSeconds(30);
 
-  private static final Duration BUILD = Duration.ofSeconds(60);
-
   private final Crew crew;
   private final Session session;
   private final Clock clock;
@@ -67,7 +65,7 @@ public final class RunMaker {
       RunRecords.write(folder, record);
       return record;
     } catch (IOException e) {
-      throw new HarnessProblem("cannot write to " + folder + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot write to " + folder, e);
     }
   }
 
@@ -82,7 +80,7 @@ public final class RunMaker {
       Files.createDirectories(folder);
       Wire.write(order(plan), folder.resolve(Wire.ORDER));
     } catch (IOException e) {
-      throw new HarnessProblem("cannot write to " + folder + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot write to " + folder, e);
     }
     return crew.perform(
         task(plan, folder, List.of(), List.of("lower", format, target)), event -> {});
@@ -112,17 +110,17 @@ public final class RunMaker {
         plan.heapShare(),
         plan.setup().threads(),
         cores,
-        limits(plan.setup().limits()));
+        limits(plan.setup().limits(), plan.build()));
   }
 
-  private static ProcessLimits limits(Limits limits) {
+  private static ProcessLimits limits(Limits limits, Duration build) {
     SortedMap<String, Duration> allowances =
         new TreeMap<>(
             Map.of(
                 ProcessLimits.START, START,
                 Phases.LOAD, START,
-                Phases.BUILD, BUILD,
-                Phases.SHUFFLE, BUILD));
+                Phases.BUILD, build,
+                Phases.SHUFFLE, build));
     return new ProcessLimits(
         Duration.ofNanos((long) (limits.wallSeconds() * 1e9)),
         Set.copyOf(Phases.LIMITED),

@@ -1,5 +1,6 @@
 package steelyard.harness.local;
 
+import java.time.Duration;
 import java.util.Collections;
 import java.util.Objects;
 import java.util.Optional;
@@ -19,6 +20,7 @@ import steelyard.results.ledger.RunKey;
  * @param attempt how often this cell was started before
  * @param place where in a plan it belongs; empty for a run in the foreground
  * @param plainCanonical digest of plain on the same instance, if it is known
+ * @param build what reading the instance and building its model may take
  * @param heapShare share of the memory limit for the Java heap
  */
 public record RunPlan(
@@ -31,6 +33,7 @@ public record RunPlan(
     Goal goal,
     long seed,
     Optional<Digest> plainCanonical,
+    Duration build,
     double heapShare) {
   public RunPlan {
     Objects.requireNonNull(run, "run");
@@ -40,6 +43,7 @@ public record RunPlan(
     Objects.requireNonNull(setup, "setup");
     Objects.requireNonNull(goal, "goal");
     Objects.requireNonNull(plainCanonical, "plainCanonical");
+    Objects.requireNonNull(build, "build");
   }
 
   /** Under what conditions it is made. */

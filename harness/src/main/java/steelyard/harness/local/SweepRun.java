@@ -89,7 +89,7 @@ public final class SweepRun {
       task.catchUp();
       task.run();
     } catch (IOException e) {
-      throw new HarnessProblem("cannot write to " + runs + ": " + e.getMessage(), e);
+      throw HarnessProblem.of("cannot write to " + runs, e);
     }
     return sweep;
   }
@@ -205,7 +205,7 @@ public final class SweepRun {
         }
         calibrating.ifDue(lease.processors());
       } catch (IOException e) {
-        throw new HarnessProblem("cannot lease a core: " + e.getMessage(), e);
+        throw HarnessProblem.of("cannot lease a core", e);
       } catch (InterruptedException e) {
         Thread.currentThread().interrupt();
       }
@@ -225,6 +225,7 @@ public final class SweepRun {
               Goal.optimise(),
               block.seed(),
               keyed.plainCanonical(block, candidate),
+              keyed.plan().sweep().build(),
               keyed.heapShare(candidate));
       listener.started(plan.run(), candidate.name(), block.instance().name());
       RunRecord record =

@@ -8,6 +8,7 @@ import java.nio.file.StandardCopyOption;
 import java.util.List;
 import java.util.UUID;
 import java.util.zip.ZipEntry;
+import java.util.zip.ZipException;
 import java.util.zip.ZipFile;
 
 /**
@@ -51,6 +52,9 @@ public final class NativeCache {
           unpack(zip, entry, file);
         }
       }
+    } catch (ZipException e) {
+      throw new IOException(
+          "the jar " + jar + " is damaged (" + e.getMessage() + "); install it again", e);
     }
     return target;
   }

@@ -1,5 +1,6 @@
 package steelyard.harness.sweep;
 
+import java.time.Duration;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
@@ -26,17 +27,21 @@ final class Allowances {
   /** The safety net of a work limit where no wall limit is given. */
   static final double NET_SECONDS = 600;
 
+  /** What reading an instance and building its model may take where nothing is said. */
+  static final Duration BUILD = Duration.ofSeconds(60);
+
   /** The memory limit where none is given. */
   static final long MEMORY_BYTES = 2_000_000_000L;
 
   /** No machine has more cores than this to give to one solver. */
   static final int MOST_THREADS = 1024;
 
-  private static final List<String> KEYS = List.of("wall", "work", "memory", "threads");
+  private static final List<String> KEYS = List.of("wall", "work", "memory", "threads", "build");
 
   private final double wallSeconds;
   private final long memoryBytes;
   private final int threads;
+  private final Duration build;
   private final Optional<Field> work;
   private final Map<String, Field> workByName;
   private final Set<String> workUsed = new HashSet<>();
@@ -57,6 +62,11 @@ final class Allowances {
         keys.flatMap(k -> k.optional("threads"))
             .map(f -> f.count(1, MOST_THREADS).orElse(1))
             .orElse(1);
+    build =
+        keys.flatMap(k -> k.optional("build"))
+            .flatMap(f -> f.parsed(Quantities::seconds))
+            .map(seconds -> Duration.ofNanos((long) (seconds * 1e9)))
+            .orElse(BUILD);
   }
 
   /** What the field says; the defaults where there is none. */
@@ -67,6 +77,11 @@ final class Allowances {
   /** The threads of a setting that says nothing of them. */
   int threads() {
     return threads;
+  }
+
+  /** What reading an instance and building its model may take. */
+  Duration build() {
+    return build;
   }
 
   /** What a run on this backend is allowed; a missing amount of work is a mistake. */

@@ -1,5 +1,6 @@
 package steelyard.harness.sweep;
 
+import java.time.Duration;
 import java.util.List;
 import java.util.Objects;
 import steelyard.results.statistics.TieMargin;
@@ -14,6 +15,7 @@ import steelyard.results.statistics.TieMargin;
  * @param seeds each once, in order; at least one
  * @param tieMargin within what distance two times are the same
  * @param penalty what a run without an answer counts as, in limits; at least 1
+ * @param build what reading an instance and building its model may take
  * @param cores how many cores the runs may hold at a time
  * @param blockSize how many runs a block has at most, the one in service among them
  * @param remarks what the file left open and how it was taken, and what to be aware of; a line each
@@ -26,6 +28,7 @@ public record Sweep(
     List<Long> seeds,
     TieMargin tieMargin,
     double penalty,
+    Duration build,
     int cores,
     int blockSize,
     List<String> remarks) {
@@ -35,6 +38,7 @@ public record Sweep(
     Objects.requireNonNull(name, "name");
     Objects.requireNonNull(notes, "notes");
     Objects.requireNonNull(tieMargin, "tieMargin");
+    Objects.requireNonNull(build, "build");
     contests = List.copyOf(contests);
     seeds = List.copyOf(seeds);
     remarks = List.copyOf(remarks);
@@ -44,9 +48,10 @@ public record Sweep(
     if (seeds.stream().distinct().count() < seeds.size()) {
       throw new IllegalArgumentException("a seed comes twice: " + seeds);
     }
-    if (!(penalty >= 1) || cores < 1 || blockSize < 2) {
+    if (!(penalty >= 1) || build.isZero() || cores < 1 || blockSize < 2) {
       throw new IllegalArgumentException(
-          "penalty, cores or block size too small: " + penalty + ", " + cores + ", " + blockSize);
+          "penalty, build limit, cores or block size too small: "
+              + List.of(penalty, build, cores, blockSize));
     }
   }
 }

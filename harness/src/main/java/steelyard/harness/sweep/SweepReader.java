@@ -68,7 +68,8 @@ final class SweepReader {
     }
     Optional<String> name =
         keys.required("name", "name: mould-shop-formulations").flatMap(Field::name);
-    List<Setup> setups = setups(keys);
+    Allowances allowances = Allowances.read(keys.optional("limits"));
+    List<Setup> setups = setups(keys, allowances);
     List<Contest> contests = contests(root, keys, setups);
     List<Long> seeds = keys.optional("seeds").map(this::seeds).orElse(List.of(0L));
     TieMargin margin = keys.optional("tie-margin").map(this::tieMargin).orElse(TIE_MARGIN);
@@ -87,14 +88,14 @@ final class SweepReader {
         seeds,
         margin,
         penalty,
+        allowances.build(),
         cores,
         blockSize,
         remarks);
   }
 
   /** All settings of all backends; none if any of them is wrong. */
-  private List<Setup> setups(Keys keys) {
-    Allowances allowances = Allowances.read(keys.optional("limits"));
+  private List<Setup> setups(Keys keys, Allowances allowances) {
     Optional<Field> backends = keys.required("backends", "backends: [sat, cpsat]");
     int before = mistakes.count();
     List<Setup> setups =

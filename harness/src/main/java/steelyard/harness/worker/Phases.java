@@ -19,4 +19,9 @@ public final class Phases {
   public static final List<String> ALL = List.of(LOAD, BUILD, SHUFFLE, LOWER, SOLVE, ANSWER, DONE);
 
   private Phases() {}
+
+  /** Reading and building one of several models. */
+  public static String build(int model) {
+    return BUILD + " " + model;
+  }
 }

@@ -82,6 +82,7 @@ public final class Worker {
     List<Subject> subjects = Wire.readSubjects(file);
     for (int i = 0; i < subjects.size(); i++) {
       Subject.OfVariant subject = (Subject.OfVariant) subjects.get(i);
+      events.phase(Phases.build(i));
       events.write(
           new Event.Built(Built.facts(Built.read(subject).model(subject.amendments()), i)));
     }

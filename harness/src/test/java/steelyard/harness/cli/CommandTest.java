@@ -7,6 +7,10 @@ import java.io.PrintWriter;
 import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.sql.Connection;
+import java.sql.DriverManager;
+import java.sql.Statement;
+import java.time.Instant;
 import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
@@ -14,6 +18,7 @@ import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
+import steelyard.results.ledger.Holder;
 import steelyard.results.ledger.Ledger;
 import steelyard.results.ledger.Observation;
 import steelyard.results.ledger.SweepSummary;
@@ -102,6 +107,57 @@ class CommandTest {
   }
 
   @Test
+  void a_variant_that_hangs_is_known_within_the_build_limit() throws IOException {
+    Result result =
+        sweep(
+            carts("[plain, plain+hangs, plain+lightest-count]", "even")
+                .replace("wall: 20 s", "build: 2 s, wall: 20 s"));
+    assertThat(result.err())
+        .contains("plain+hangs")
+        .contains("its family took more than 2.0 s to read and build it");
+    assertThat(result.out()).contains("plain on sat", "plain+light…-count on sat      1/1      1");
+  }
+
+  @Test
+  void a_ledger_that_cannot_be_used_is_refused_in_one_line() throws Exception {
+    assertThat(sweep(carts("[plain]", "even")).status()).isEqualTo(ExitStatus.OK);
+    Path file = folder.resolve("a ledger/runs.db");
+    try (Ledger held = Ledger.write(file, new Holder(7, "sweep other", Instant.EPOCH))) {
+      assertRefused(sweep(carts("[plain]", "even")), "in use by process 7, sweep other, since");
+      assertThat(held.plans().sweeps()).hasSize(1);
+    }
+    try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file);
+        Statement statement = connection.createStatement()) {
+      statement.execute("PRAGMA user_version = 99");
+    }
+    assertRefused(sweep(carts("[plain]", "even")), "written by a newer version (schema 99");
+    assertRefused(run("brief", "--ledger", ledgerFolder()), "written by a newer version");
+    Path sweep = folder.resolve("cart night.yaml");
+    assertRefused(
+        run("sweep", sweep.toString(), "--ledger", "/proc/ledger"),
+        "cannot make the ledger's folder /proc/ledger: ");
+    assertRefused(
+        run("sweep", sweep.toString(), "--ledger", sweep.toString()),
+        "a file stands where a folder is needed");
+  }
+
+  private static void assertRefused(Result result, String why) {
+    assertThat(result.status()).as(result.err()).isEqualTo(ExitStatus.BAD_INPUT);
+    assertThat(result.err()).contains(why).doesNotContain("\tat ");
+    assertThat(result.out()).isEmpty();
+  }
+
+  @Test
+  void an_instance_that_is_none_is_refused_in_one_line() throws IOException {
+    Path file = folder.resolve("cart that is none");
+    Files.writeString(file, "seven sacks of clay\n");
+    assertRefused(
+        run("solve", "faulty-cart", file.toString(), "--backend", "sat"), "cart that is none");
+    assertRefused(
+        run("solve", "faulty-cart", folder.toString(), "--backend", "sat"), "unknown instance");
+  }
+
+  @Test
   void solves_in_the_foreground_and_prints_one_json_object() {
     Result result =
         run("solve", "faulty-cart", CARTS.resolve("even").toString(), "--backend", "sat", "--json");
@@ -145,6 +201,18 @@ class CommandTest {
         Arguments.of(
             List.of("solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+exits"),
             "ended without an answer"),
+        Arguments.of(
+            List.of(
+                "solve",
+                "faulty-cart",
+                even,
+                "--backend",
+                "sat",
+                "--variant",
+                "plain+hangs",
+                "--build",
+                "2s"),
+            "reading the instance or building the model took longer than allowed"),
         Arguments.of(
             List.of(
                 "solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+overflows"),

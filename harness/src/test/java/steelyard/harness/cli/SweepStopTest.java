@@ -71,7 +71,7 @@ class SweepStopTest {
         variants: [plain, plain+lightest-count]
         backends: [sat]
         instances: {folder: "%s", names: [even]}
-        seeds: 6
+        seeds: 4
         limits: {wall: 20 s, memory: 1 GB}
         """
         .formatted(CARTS);
@@ -104,7 +104,7 @@ class SweepStopTest {
   /** Whether a run has finished and the next one has a process. */
   private boolean ran(Path log) {
     try {
-      return Files.readString(log).contains("1/12  even") && sweep.descendants().count() > 1;
+      return Files.readString(log).contains("1/8  even") && sweep.descendants().count() > 1;
     } catch (IOException e) {
       throw new IllegalStateException(e);
     }
@@ -119,7 +119,7 @@ class SweepStopTest {
   private void assertEachOnce() {
     try (Ledger ledger = Ledger.read(ledger().resolve("runs.db"))) {
       List<Observation> seen = ledger.observations(ledger.plans().sweeps().get(0).id());
-      assertThat(seen).hasSize(12).allMatch(Observation::proved);
+      assertThat(seen).hasSize(8).allMatch(Observation::proved);
       assertThat(seen).extracting(Observation::run).doesNotHaveDuplicates();
     }
   }

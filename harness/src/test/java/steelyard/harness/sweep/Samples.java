@@ -8,6 +8,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -174,6 +175,7 @@ final class Samples {
         numbers,
         new TieMargin(0.05, 0.05),
         2,
+        Duration.ofMinutes(1),
         1,
         blockSize,
         List.of());

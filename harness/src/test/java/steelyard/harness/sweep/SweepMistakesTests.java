@@ -174,7 +174,7 @@ class SweepMistakesTests {
     assertThat(withMore("limits:", "  wall: 3 s", "  memmory: 1 GB"))
         .containsExactly(
             "sweep.yaml:7:3: limits: unknown key 'memmory' (did you mean 'memory'?)",
-            "  known: wall, work, memory, threads");
+            "  known: wall, work, memory, threads, build");
   }
 
   @Test

@@ -1,6 +1,7 @@
 package steelyard.results.ledger;
 
 import java.time.Instant;
+import java.time.temporal.ChronoUnit;
 
 /**
  * Who writes to a ledger, told to whoever else wants to.
@@ -17,6 +18,7 @@ public record Holder(long pid, String purpose, Instant since) {
 
   /** One line for people. */
   String line() {
-    return "process %d, %s, since %s".formatted(pid, purpose, since);
+    return "process %d, %s, since %s"
+        .formatted(pid, purpose, since.truncatedTo(ChronoUnit.SECONDS));
   }
 }

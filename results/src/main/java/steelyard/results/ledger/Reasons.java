@@ -8,11 +8,12 @@ import java.nio.file.NoSuchFileException;
 import java.nio.file.NotDirectoryException;
 
 /** Says why a file operation failed; exceptions of the library often say no more than the path. */
-final class Reasons {
+public final class Reasons {
 
   private Reasons() {}
 
-  static String of(IOException e) {
+  /** The reason in a few words, without the path. */
+  public static String of(IOException e) {
     if (e instanceof NoSuchFileException || e instanceof NotDirectoryException) {
       return "no such folder or file";
     }
