@@ -18,7 +18,7 @@ final class NativeLibrary {
       // The loader is silent where it cannot unpack: only a native call tells.
       new SolveWrapper().delete();
       return Optional.empty();
-    } catch (LinkageError | RuntimeException e) {
+    } catch (UnsatisfiedLinkError | ExceptionInInitializerError | RuntimeException e) {
       return Optional.of(
           "cpsat cannot load the native library jniortools for "
               + System.getProperty("os.name")
