@@ -12,17 +12,23 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.FieldSource;
 import steelyard.variants.model.AllDifferent;
 import steelyard.variants.model.Atom;
+import steelyard.variants.model.Automaton;
 import steelyard.variants.model.Clause;
+import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Conditional;
 import steelyard.variants.model.Constraint;
 import steelyard.variants.model.Cumulative;
 import steelyard.variants.model.Definition;
+import steelyard.variants.model.DistinctValues;
 import steelyard.variants.model.Division;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.Element;
 import steelyard.variants.model.Ints;
 import steelyard.variants.model.Linear;
+import steelyard.variants.model.Modulo;
 import steelyard.variants.model.NoOverlap;
+import steelyard.variants.model.Product;
+import steelyard.variants.model.Regular;
 import steelyard.variants.model.Relation;
 import steelyard.variants.model.Table;
 import steelyard.variants.model.Task;
@@ -102,6 +108,58 @@ class DecompositionTest {
         new Cumulative(Tasks.of(absentUnless), Views.ofConstants(0), View.constant(-1));
     assertThat(Decomposition.of(short0, fresh).holds())
         .containsExactly(Clause.of(Atom.isNot(0, 1)));
+  }
+
+  private static final View X = View.of(0);
+  private static final View Y = View.of(1);
+  private static final View Z = View.of(2);
+
+  @Test
+  void multipliesInBinary_whereFactorsHaveManyValues() {
+    List<Domain> domains =
+        List.of(Domain.between(-9, 12), Domain.between(-3, 17), Domain.of(-27, -1, 0, 60, 91));
+    assertDecomposes(domains, new Product(X, Y, Z));
+    assertDecomposes(domains, new Product(Y.negated().shifted(2), X.shifted(-4), Z));
+    assertDecomposes(domains, new Product(X, X, Y.shifted(40)));
+    assertDecomposes(domains, new Product(X, X.shifted(1), Z));
+  }
+
+  @Test
+  void dividesTowardZero_whereDivisorsHaveManyValues() {
+    List<Domain> domains =
+        List.of(Domain.between(-20, 23), Domain.between(-9, 9), Domain.between(-3, 4));
+    assertDecomposes(domains, new Division(X, Y, Z));
+    assertDecomposes(domains, new Modulo(X, Y, Z));
+    assertDecomposes(domains, new Modulo(X, X.shifted(3), Z));
+    assertDecomposes(domains, new Modulo(X, View.constant(-7), Z.negated()));
+    assertDecomposes(domains, new Division(View.constant(7), Y.negated(), Y.shifted(-1)));
+  }
+
+  @Test
+  void joinsTheValuesThatAnAutomatonDoesNotKnow() {
+    List<Domain> domains = List.of(Domain.between(-9, 9), Domain.of(4, 5), Domain.between(3, 12));
+    Automaton automaton =
+        Automaton.of(2, Ints.of(1), new int[] {0, 4, 1}, new int[] {0, 5, 0}, new int[] {1, 4, 0});
+    assertDecomposes(domains, new Regular(Views.of(X, Y, Z, X), automaton));
+    Automaton mute = Automaton.of(1, Ints.of(0));
+    assertDecomposes(domains, new Regular(Views.of(X), mute));
+    assertDecomposes(domains, new Regular(Views.of(), mute));
+  }
+
+  @Test
+  void countsWhatIsNew_whereThereAreManyValues() {
+    List<Domain> domains =
+        List.of(Domain.between(0, 19), Domain.between(5, 25), Domain.between(0, 3));
+    for (Comparison op : Comparison.values()) {
+      assertDecomposes(domains, new DistinctValues(Views.of(X, Y, X), op, Z));
+    }
+  }
+
+  private static void assertDecomposes(List<Domain> domains, Relation relation) {
+    Fresh fresh = fresh(domains);
+    Truth truth = Decomposition.of(relation, fresh);
+    assertAgrees(domains, fresh, relation, truth.definitions(), truth.holds());
+    assertReduces(domains, new Conditional(Atom.TRUE, Conditional.Mode.IF, relation));
   }
 
   private static void assertReduces(List<Domain> domains, Conditional constraint) {

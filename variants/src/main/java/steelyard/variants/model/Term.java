@@ -7,9 +7,16 @@ import java.util.Objects;
 import java.util.stream.Collectors;
 
 /**
- * An integer expression, kept as written. Sums are exact: what could pass 2^62 - 1 is refused when
- * it is posted. An {@link Entry} is partial: outside its array it is undefined, and the nearest
- * formula around it is then false (relational semantics).
+ * An integer expression, kept as written. Sums and products are exact: what could pass 2^62 - 1 is
+ * refused when it is posted. An {@link Entry} is partial: outside its array it is undefined; so are
+ * {@link Quotient} and {@link Remainder} where the divisor is 0. The nearest formula around what is
+ * undefined is false (relational semantics).
+ *
+ * <pre>{@code
+ * Term rows = tiles.plus(perRow).minus(1).dividedBy(perRow);   // rounded up, tiles being positive
+ * draft.group("on the hour").post(start.remainder(60).eq(0));
+ * draft.group("few high firings").post(Term.count(programs, 4, 5).le(3));
+ * }</pre>
  */
 public sealed interface Term
     permits IntVar,
@@ -19,6 +26,9 @@ public sealed interface Term
         Term.Largest,
         Term.Smallest,
         Term.Absolute,
+        Term.Product,
+        Term.Quotient,
+        Term.Remainder,
         Term.Entry,
         Term.Truth {
 
@@ -85,6 +95,48 @@ public sealed interface Term
     @Override
     public String toString() {
       return "abs(" + term + ")";
+    }
+  }
+
+  /** {@code left * right}. */
+  record Product(Term left, Term right) implements Term {
+    public Product {
+      Objects.requireNonNull(left, "left");
+      Objects.requireNonNull(right, "right");
+    }
+
+    @Override
+    public String toString() {
+      return left + " * " + right;
+    }
+  }
+
+  /** {@code dividend / divisor} rounded toward 0, as in Java; undefined where the divisor is 0. */
+  record Quotient(Term dividend, Term divisor) implements Term {
+    public Quotient {
+      Objects.requireNonNull(dividend, "dividend");
+      Objects.requireNonNull(divisor, "divisor");
+    }
+
+    @Override
+    public String toString() {
+      return "(" + dividend + " / " + divisor + ")";
+    }
+  }
+
+  /**
+   * What {@link Quotient} leaves: {@code dividend % divisor}, of the dividend's sign, as in Java;
+   * undefined where the divisor is 0.
+   */
+  record Remainder(Term dividend, Term divisor) implements Term {
+    public Remainder {
+      Objects.requireNonNull(dividend, "dividend");
+      Objects.requireNonNull(divisor, "divisor");
+    }
+
+    @Override
+    public String toString() {
+      return "(" + dividend + " % " + divisor + ")";
     }
   }
 
@@ -173,6 +225,15 @@ public sealed interface Term
     return new Entry(constants.stream().<Term>mapToObj(Constant::new).toList(), index);
   }
 
+  /** How many of the terms have one of {@code values}; a term that is undefined has none. */
+  static Term count(Collection<? extends Term> terms, long... values) {
+    return sum(
+        terms.stream()
+            .map(term -> truth(Formula.any(Arrays.stream(values).mapToObj(term::eq).toList())))
+            .toList());
+  }
+
+  /** 1 where the formula holds, else 0. */
   static Term truth(Formula formula) {
     return new Truth(formula);
   }
@@ -195,6 +256,30 @@ public sealed interface Term
 
   default Term times(long factor) {
     return new Sum(List.of(this), Longs.of(factor));
+  }
+
+  default Term times(Term other) {
+    return new Product(this, other);
+  }
+
+  /** This divided by {@code divisor}, rounded toward 0; undefined where it is 0. */
+  default Term dividedBy(Term divisor) {
+    return new Quotient(this, divisor);
+  }
+
+  /** This divided by {@code divisor}, rounded toward 0. */
+  default Term dividedBy(long divisor) {
+    return dividedBy(constant(divisor));
+  }
+
+  /** What division by {@code divisor} leaves, of this term's sign; undefined where it is 0. */
+  default Term remainder(Term divisor) {
+    return new Remainder(this, divisor);
+  }
+
+  /** What division by {@code divisor} leaves, of this term's sign. */
+  default Term remainder(long divisor) {
+    return remainder(constant(divisor));
   }
 
   default Term negated() {

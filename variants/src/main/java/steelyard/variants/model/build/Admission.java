@@ -81,6 +81,15 @@ final class Admission implements RelationVisitor<Void> {
       smallest.terms().forEach(this::check);
     } else if (term instanceof Term.Absolute absolute) {
       check(absolute.term());
+    } else if (term instanceof Term.Product product) {
+      check(product.left());
+      check(product.right());
+    } else if (term instanceof Term.Quotient quotient) {
+      check(quotient.dividend());
+      check(quotient.divisor());
+    } else if (term instanceof Term.Remainder remainder) {
+      check(remainder.dividend());
+      check(remainder.divisor());
     } else if (term instanceof Term.Entry entry) {
       entry.array().forEach(this::check);
       check(entry.index());

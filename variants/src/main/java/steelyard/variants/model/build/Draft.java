@@ -40,7 +40,8 @@ public interface Draft {
 
   /**
    * A variable that has the term's value: completed by the judge, never negated, not lowered where
-   * nothing uses it. The term must be total: no array entry that may lie outside.
+   * nothing uses it. The term must be total: no array entry that may lie outside, no divisor that
+   * may be 0.
    */
   IntVar define(String name, Term total);
 

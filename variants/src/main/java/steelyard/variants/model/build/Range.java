@@ -3,6 +3,8 @@ package steelyard.variants.model.build;
 import java.util.Collection;
 import java.util.List;
 import java.util.function.LongSupplier;
+import java.util.stream.LongStream;
+import java.util.stream.Stream;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.IntVar;
 import steelyard.variants.model.LinearSum;
@@ -51,6 +53,18 @@ record Range(long min, long max) {
     }
     if (term instanceof Term.Absolute absolute) {
       return of(absolute.term(), pool).magnitude();
+    }
+    if (term instanceof Term.Product product) {
+      Range left = of(product.left(), pool);
+      return product.left().equals(product.right())
+          ? left.squared()
+          : left.times(of(product.right(), pool));
+    }
+    if (term instanceof Term.Quotient quotient) {
+      return of(quotient.dividend(), pool).dividedBy(of(quotient.divisor(), pool));
+    }
+    if (term instanceof Term.Remainder remainder) {
+      return of(remainder.dividend(), pool).remainder(of(remainder.divisor(), pool));
     }
     if (term instanceof Term.Entry entry) {
       List<Range> parts = of(entry.array(), pool);
@@ -104,26 +118,67 @@ record Range(long min, long max) {
     return new Range(Math.min(a, b), Math.max(a, b));
   }
 
+  private Range times(Range other) {
+    return hull(Stream.of(times(other.min), times(other.max)));
+  }
+
+  private Range squared() {
+    Range size = magnitude();
+    return new Range(size.times(size.min).min, size.times(size.max).max);
+  }
+
+  /**
+   * A quotient is largest in magnitude where the divisor is closest to 0. Where that would be 0, it
+   * is 1, as in the definition that makes a quotient total.
+   */
+  private Range dividedBy(Range divisor) {
+    return hull(
+        LongStream.of(divisor.min, -1, 1, divisor.max)
+            .map(y -> y == 0 ? 1 : y)
+            .filter(y -> divisor.contains(y) || (y == 1 && divisor.contains(0)))
+            .mapToObj(y -> new Range(Math.min(min / y, max / y), Math.max(min / y, max / y))));
+  }
+
+  /** A remainder has the dividend's sign, and is smaller than the divisor. */
+  private Range remainder(Range divisor) {
+    long most = Math.max(0, divisor.magnitude().max - 1);
+    long least = Math.max(Math.min(min, 0), -most);
+    return new Range(least, Math.min(Math.max(max, 0), most));
+  }
+
+  /** The least range around all of at least one. */
+  private static Range hull(Stream<Range> ranges) {
+    return ranges
+        .reduce((a, b) -> new Range(Math.min(a.min, b.min), Math.max(a.max, b.max)))
+        .orElseThrow();
+  }
+
   private Range magnitude() {
     long low = min > 0 ? min : max < 0 ? -max : 0;
     return new Range(low, Math.max(Math.abs(min), Math.abs(max)));
+  }
+
+  private boolean contains(long value) {
+    return min <= value && value <= max;
   }
 
   boolean isFixed() {
     return min == max;
   }
 
-  /** The range as a variable's domain. */
-  Domain domain(String what) {
+  /** The range as the domain of a variable for {@code term}. */
+  Domain domain(Term term) {
     if (min < -Domain.LIMIT || max > Domain.LIMIT) {
       throw new ModelException(
-          what
+          term
               + " ranges over "
               + min
               + ".."
               + max
-              + ", beyond what a variable can take (10^9 in magnitude); keep the sum inside a"
-              + " comparison instead of naming it");
+              + ", beyond what a variable can take (10^9 in magnitude); "
+              + (term instanceof Term.Product
+                  ? "use smaller domains"
+                  : "keep the sum inside a comparison instead of naming it"));
     }
     return Domain.between((int) min, (int) max);
   }
@@ -145,6 +200,7 @@ record Range(long min, long max) {
 
   private static ModelException overflow(ArithmeticException cause) {
     return new ModelException(
-        "a sum can pass 2^62 - 1 in magnitude; use smaller coefficients or domains", cause);
+        "a sum or product can pass 2^62 - 1 in magnitude; use smaller coefficients or domains",
+        cause);
   }
 }

@@ -13,7 +13,10 @@ import steelyard.variants.model.View;
 final class Splitting {
   private Splitting() {}
 
-  /** {@code max(..) <= r} as every part at most r, and its three mirror images. */
+  /**
+   * {@code max(..) <= r} as every part at most r, and its three mirror images; a magnitude is the
+   * larger of a term and its negative.
+   */
   static Optional<Formula> ofExtreme(Formula.Compare compare) {
     Term left = compare.left();
     Term right = compare.right();
@@ -23,6 +26,12 @@ final class Splitting {
     }
     if (atMost && left instanceof Term.Largest largest) {
       return Optional.of(Formula.all(largest.terms().stream().map(t -> t.le(right)).toList()));
+    }
+    if (atMost && left instanceof Term.Absolute absolute) {
+      return Optional.of(absolute.term().le(right).and(absolute.term().negated().le(right)));
+    }
+    if (!atMost && right instanceof Term.Absolute absolute) {
+      return Optional.of(left.ge(absolute.term()).and(left.ge(absolute.term().negated())));
     }
     if (!atMost && left instanceof Term.Smallest smallest) {
       return Optional.of(Formula.all(smallest.terms().stream().map(t -> t.ge(right)).toList()));

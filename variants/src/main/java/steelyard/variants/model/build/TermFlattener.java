@@ -4,12 +4,14 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.Function;
+import steelyard.variants.model.Absolute;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Comparison;
 import steelyard.variants.model.Conditional;
 import steelyard.variants.model.Constraint;
 import steelyard.variants.model.Definition;
+import steelyard.variants.model.Division;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.Element;
 import steelyard.variants.model.Formula;
@@ -17,6 +19,8 @@ import steelyard.variants.model.IntVar;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.LinearSum;
 import steelyard.variants.model.Maximum;
+import steelyard.variants.model.Modulo;
+import steelyard.variants.model.Product;
 import steelyard.variants.model.Relation;
 import steelyard.variants.model.Term;
 import steelyard.variants.model.View;
@@ -60,6 +64,12 @@ final class TermFlattener {
         long product = Math.multiplyExact(factor, parts.coefficients().get(i));
         add(product, parts.terms().get(i), sum, guards);
       }
+    } else if (term instanceof Term.Product product
+        && product.left() instanceof Term.Constant constant) {
+      add(Math.multiplyExact(factor, constant.value()), product.right(), sum, guards);
+    } else if (term instanceof Term.Product product
+        && product.right() instanceof Term.Constant constant) {
+      add(Math.multiplyExact(factor, constant.value()), product.left(), sum, guards);
     } else {
       sum.add(factor, view(term, guards));
     }
@@ -73,7 +83,7 @@ final class TermFlattener {
     if (term instanceof View view) {
       return view;
     }
-    if (term instanceof Term.Constant || term instanceof Term.Sum) {
+    if (isSum(term)) {
       return ofSum(linear(term, guards), Range.of(term, pool), term);
     }
     if (term instanceof Term.Truth truth) {
@@ -90,6 +100,15 @@ final class TermFlattener {
     return found;
   }
 
+  /** Whether the term is a linear sum of others. */
+  private static boolean isSum(Term term) {
+    return term instanceof Term.Constant
+        || term instanceof Term.Sum
+        || (term instanceof Term.Product product
+            && (product.left() instanceof Term.Constant
+                || product.right() instanceof Term.Constant));
+  }
+
   /** The domain of a variable that equals {@code term}. */
   static Domain domain(Term term, Pool pool) {
     boolean isConstants =
@@ -99,7 +118,7 @@ final class TermFlattener {
         ? Domain.of(
             ((Term.Entry) term)
                 .array().stream().mapToInt(entry -> (int) ((Term.Constant) entry).value()))
-        : Range.of(term, pool).domain(term.toString());
+        : Range.of(term, pool).domain(term);
   }
 
   /** Whether {@link #defining} has a relation of its own for the term. */
@@ -107,7 +126,10 @@ final class TermFlattener {
     return term instanceof Term.Largest
         || term instanceof Term.Smallest
         || term instanceof Term.Absolute
-        || term instanceof Term.Entry;
+        || term instanceof Term.Quotient
+        || term instanceof Term.Remainder
+        || term instanceof Term.Entry
+        || (term instanceof Term.Product && !isSum(term));
   }
 
   /** The relation that says {@code own} equals a term for which {@link #hasRelation}. */
@@ -119,10 +141,23 @@ final class TermFlattener {
       return Maximum.minimum(Views.of(views(smallest.terms(), guards)), own);
     }
     if (term instanceof Term.Absolute absolute) {
-      View view = view(absolute.term(), guards);
-      return new Maximum(Views.of(view, view.negated()), own);
+      return new Absolute(view(absolute.term(), guards), own);
     }
-    Term.Entry entry = (Term.Entry) term;
+    if (term instanceof Term.Product product) {
+      return new Product(number(product.left(), guards), number(product.right(), guards), own);
+    }
+    if (term instanceof Term.Quotient quotient) {
+      View dividend = number(quotient.dividend(), guards);
+      return new Division(dividend, divisor(quotient.divisor(), guards), own);
+    }
+    if (term instanceof Term.Remainder remainder) {
+      View dividend = number(remainder.dividend(), guards);
+      return new Modulo(dividend, divisor(remainder.divisor(), guards), own);
+    }
+    return entry((Term.Entry) term, own, guards);
+  }
+
+  private Element entry(Term.Entry entry, View own, List<Atom> guards) {
     View index = view(entry.index(), guards);
     Views array = Views.of(views(entry.array(), guards));
     int last = array.size() - 1;
@@ -136,13 +171,45 @@ final class TermFlattener {
     return new Element(array, clamped(index, last), own);
   }
 
+  /** The view of a term that takes part in a product or quotient: within 10^9. */
+  private View number(Term term, List<Atom> guards) {
+    View view = view(term, guards);
+    Range.of(view, pool).domain(term);
+    return view;
+  }
+
+  /** The divisor where it is not 0, else 1. */
+  private View divisor(Term term, List<Atom> guards) {
+    View view = number(term, guards);
+    Atom isZero = Unary.simplified(view.is(0), pool);
+    if (isZero.equals(Atom.FALSE)) {
+      return view;
+    }
+    guards.add(isZero.negated());
+    Range range = Range.of(view, pool);
+    if (range.isFixed()) {
+      return View.constant(1);
+    }
+    View usable = truth(isZero.negated());
+    return define(
+        withoutZero(range), own -> new Element(Views.of(View.constant(1), view), usable, own));
+  }
+
+  /** The values of the range other than 0, and 1. */
+  private static Domain withoutZero(Range range) {
+    int most = (int) Math.max(1, range.max());
+    return range.min() < 0
+        ? Domain.ofRanges((int) range.min(), -1, 1, most)
+        : Domain.between(1, most);
+  }
+
   private List<View> views(List<Term> terms, List<Atom> guards) {
     return terms.stream().map(term -> view(term, guards)).toList();
   }
 
   private View ofSum(LinearSum sum, Range range, Term term) {
     if (sum.size() == 0) {
-      return View.constant(range.domain(term.toString()).min());
+      return View.constant(range.domain(term).min());
     }
     boolean isView = sum.size() == 1 && Math.abs(sum.coefficient(0)) == 1;
     if (isView && Math.abs(sum.constant()) <= Domain.LIMIT) {
@@ -150,7 +217,7 @@ final class TermFlattener {
     }
     View found = known.get(term);
     if (found == null) {
-      found = define(range.domain(term.toString()), own -> equation(sum, own));
+      found = define(range.domain(term), own -> equation(sum, own));
       known.put(term, found);
     }
     return found;

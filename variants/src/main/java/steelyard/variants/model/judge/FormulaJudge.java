@@ -16,7 +16,7 @@ final class FormulaJudge {
   private final Assignment values;
   private final RelationJudge relations;
 
-  /** Set when a term met an entry outside its array. */
+  /** Set when a term met an entry outside its array or a divisor 0. */
   private boolean undefined;
 
   FormulaJudge(Assignment values) {
@@ -89,6 +89,15 @@ final class FormulaJudge {
     if (term instanceof Term.Absolute absolute) {
       return Math.abs(value(absolute.term()));
     }
+    if (term instanceof Term.Product product) {
+      return value(product.left()) * value(product.right());
+    }
+    if (term instanceof Term.Quotient quotient) {
+      return divide(quotient.dividend(), quotient.divisor(), (x, y) -> x / y);
+    }
+    if (term instanceof Term.Remainder remainder) {
+      return divide(remainder.dividend(), remainder.divisor(), (x, y) -> x % y);
+    }
     if (term instanceof Term.Entry entry) {
       return entry(entry);
     }
@@ -105,6 +114,16 @@ final class FormulaJudge {
 
   private long fold(List<Term> terms, LongBinaryOperator operator) {
     return terms.stream().mapToLong(this::value).reduce(operator).orElseThrow();
+  }
+
+  private long divide(Term dividend, Term divisor, LongBinaryOperator operator) {
+    long x = value(dividend);
+    long y = value(divisor);
+    if (y == 0) {
+      undefined = true;
+      return 0;
+    }
+    return operator.applyAsLong(x, y);
   }
 
   private long entry(Term.Entry entry) {

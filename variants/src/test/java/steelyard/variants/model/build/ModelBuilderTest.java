@@ -12,9 +12,12 @@ import steelyard.variants.model.Branching;
 import steelyard.variants.model.Cumulative;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.IntVar;
+import steelyard.variants.model.Knapsack;
+import steelyard.variants.model.Longs;
 import steelyard.variants.model.Model;
 import steelyard.variants.model.Permutation;
 import steelyard.variants.model.Posting;
+import steelyard.variants.model.Product;
 import steelyard.variants.model.Role;
 import steelyard.variants.model.Task;
 import steelyard.variants.model.Tasks;
@@ -137,11 +140,69 @@ class ModelBuilderTest {
                       IntVar x = draft.integer("x", 0, Domain.LIMIT);
                       draft.group("huge").post(x.times(1L << 40).le(5));
                     }))
-        .hasMessageStartingWith("plain/huge: a sum can pass 2^62 - 1");
+        .hasMessageStartingWith("plain/huge: a sum or product can pass 2^62 - 1");
     assertThatThrownBy(
             () -> ModelBuilder.of(draft -> draft.define("y", Term.constant(2_000_000_000L))))
         .hasMessageContaining("plain/y:")
         .hasMessageContaining("keep the sum inside a comparison");
+  }
+
+  @Test
+  void says_where_a_product_is_too_large() {
+    assertThatThrownBy(
+            () ->
+                ModelBuilder.of(
+                    draft -> {
+                      IntVar x = draft.integer("x", -40_000, 0);
+                      draft.group("square").post(x.times(x).ge(5));
+                    }))
+        .hasMessage(
+            "plain/square: x * x ranges over 0..1600000000, beyond what a variable can take (10^9"
+                + " in magnitude); use smaller domains");
+    assertThatThrownBy(
+            () ->
+                ModelBuilder.of(
+                    draft -> {
+                      IntVar x = draft.integer("x", 0, Domain.LIMIT);
+                      draft.group("area").post(new Product(x.shifted(1), x.view(), x.view()));
+                    }))
+        .hasMessage("plain/area: a factor can pass 10^9 in magnitude: 1..1000000001");
+    assertThatThrownBy(
+            () ->
+                ModelBuilder.of(
+                    draft -> {
+                      IntVar x = draft.integer("x", 0, Domain.LIMIT);
+                      draft
+                          .group("load")
+                          .post(
+                              new Knapsack(
+                                  Views.of(x, x),
+                                  Longs.of(3_000_000_000L, 3_000_000_000L),
+                                  View.constant(1),
+                                  Longs.of(1, 1),
+                                  View.constant(1)));
+                    }))
+        .hasMessageStartingWith("plain/load: a sum or product can pass 2^62 - 1");
+  }
+
+  @Test
+  void defines_quotients_and_remainders_of_divisors_that_are_never_0() {
+    Model model =
+        ModelBuilder.of(
+            draft -> {
+              IntVar x = draft.integer("x", -9, 9);
+              IntVar y = draft.integer("y", Domain.of(-3, -1, 2));
+              IntVar q = draft.define("q", x.dividedBy(y));
+              IntVar r = draft.define("r", x.remainder(y));
+              draft.group("least").post(q.times(y).plus(r).eq(x).and(q.ge(-4)));
+            });
+    Evaluator evaluator = new Evaluator(model);
+    assertThat(evaluator.judge(new int[] {-9, 2}).complete().stream().limit(4))
+        .containsExactly(-9, 2, -4, -1);
+    assertThat(evaluator.judge(new int[] {-9, 2}).isValid()).isTrue();
+    assertThat(evaluator.judge(new int[] {-9, -3}).complete().stream().limit(4))
+        .containsExactly(-9, -3, 3, 0);
+    assertThat(evaluator.judge(new int[] {9, -1}).isValid()).isFalse();
   }
 
   @Test
@@ -154,6 +215,15 @@ class ModelBuilderTest {
                       draft.define("entry", Term.at(List.of(i, i, i), i));
                     }))
         .hasMessageContaining("plain/entry:")
+        .hasMessageContaining("a definition must be total");
+    assertThatThrownBy(
+            () ->
+                ModelBuilder.of(
+                    draft -> {
+                      IntVar i = draft.integer("i", 0, 3);
+                      draft.define("share", Term.constant(7).dividedBy(i));
+                    }))
+        .hasMessageContaining("plain/share:")
         .hasMessageContaining("a definition must be total");
     assertThatThrownBy(
             () ->

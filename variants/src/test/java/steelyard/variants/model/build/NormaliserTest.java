@@ -111,12 +111,16 @@ class NormaliserTest {
           ? Term.constant(random.nextInt(-2, 3))
           : view(variables, random);
     }
-    return switch (random.nextInt(7)) {
+    return switch (random.nextInt(11)) {
       case 0 -> Term.max(terms(variables, random, depth - 1));
       case 1 -> Term.min(terms(variables, random, depth - 1));
       case 2 -> Term.abs(term(variables, random, depth - 1));
       case 3 -> Term.at(terms(variables, random, depth - 1), term(variables, random, depth - 1));
       case 4 -> Term.truth(formula(variables, random, depth - 1));
+      case 5 -> term(variables, random, depth - 1).times(term(variables, random, depth - 1));
+      case 6 -> term(variables, random, depth - 1).dividedBy(term(variables, random, depth - 1));
+      case 7 -> term(variables, random, depth - 1).remainder(term(variables, random, depth - 1));
+      case 8 -> Term.count(terms(variables, random, depth - 1), 1, -1);
       default ->
           term(variables, random, depth - 1)
               .times(random.nextInt(-2, 3))
