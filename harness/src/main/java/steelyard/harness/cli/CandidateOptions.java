@@ -36,7 +36,8 @@ final class CandidateOptions {
       names = "--variant",
       paramLabel = "VARIANT",
       defaultValue = "plain",
-      description = "plain, or plain+AMENDMENT+AMENDMENT. Default: ${DEFAULT-VALUE}")
+      description =
+          "plain, plain+AMENDMENT+AMENDMENT, or with a version: plain@ALIAS. Default: ${DEFAULT-VALUE}")
   String variant;
 
   @Option(
@@ -96,18 +97,19 @@ final class CandidateOptions {
 
   /** The run that the options describe. */
   RunPlan plan(Catalogue catalogue, Goal goal) {
-    Catalogue.Family known = SingleChoice.family(catalogue, family);
+    SingleChoice.Chosen chosen = SingleChoice.variant(catalogue, family, variant);
+    Catalogue.Family known = chosen.family();
     Catalogue.Backend technology = SingleChoice.backend(catalogue, backend);
     Instance data = SingleChoice.instance(known, instance);
     Setup setup = SingleChoice.setup(catalogue, backend, options, threads, limits(technology));
     Recipe recipe =
         new Recipe(
             known.name(),
-            Optional.empty(),
+            known.alias(),
             known.code(),
             data.forRecipe(),
-            SingleChoice.amendments(known, variant),
-            variant);
+            chosen.variant().amendments(),
+            chosen.variant().name());
     return new RunPlan(
         RunIds.next(),
         new RunKey(0, 0),

@@ -1,9 +1,7 @@
 package steelyard.harness.cli;
 
 import java.io.IOException;
-import java.nio.file.Path;
 import java.time.Clock;
-import java.util.List;
 import java.util.OptionalInt;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -21,6 +19,7 @@ import steelyard.harness.process.StopSignals;
 import steelyard.harness.process.StopSwitch;
 import steelyard.harness.process.Tools;
 import steelyard.harness.sweep.Catalogue;
+import steelyard.harness.sweep.FamilyJars;
 import steelyard.results.ledger.Session;
 
 /** What a command that starts workers works with; ends them all when it is closed. */
@@ -41,9 +40,9 @@ final class Desk implements AutoCloseable {
     crew = new Crew(installation, launcher, cache, stop);
   }
 
-  static Desk open(List<Path> familyJars) {
+  static Desk open(FamilyJars jars) {
     try {
-      return new Desk(Installation.here().with(familyJars), CacheFolder.here());
+      return new Desk(Installation.here().with(jars.byAlias()), CacheFolder.here());
     } catch (IOException e) {
       throw HarnessProblem.of("cannot prepare the cache folder", e);
     }

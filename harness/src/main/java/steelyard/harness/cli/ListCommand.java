@@ -59,7 +59,7 @@ final class ListCommand implements Callable<Integer> {
       sweeps(out);
       return ExitStatus.OK;
     }
-    try (Desk desk = Desk.open(shared.familyJars)) {
+    try (Desk desk = Desk.open(shared.jars())) {
       Catalogue catalogue = desk.catalogue();
       switch (what) {
         case backends -> backends(catalogue, out);
@@ -71,7 +71,7 @@ final class ListCommand implements Callable<Integer> {
   }
 
   private static void family(Catalogue.Family family, PrintWriter out) {
-    out.println(family.name());
+    out.println(family.label());
     Columns.wrapped(out, "  ", family.summary());
     for (Catalogue.Amendment amendment : family.amendments()) {
       out.println("  + " + amendment.name() + " (" + amendment.role() + ")");
@@ -111,7 +111,7 @@ final class ListCommand implements Callable<Integer> {
   private void instances(Catalogue catalogue, PrintWriter out) {
     for (Catalogue.Family each : catalogue.families()) {
       if (family == null || each.name().equals(family)) {
-        SingleChoice.listed(each).forEach(line -> out.println(each.name() + "  " + line));
+        SingleChoice.listed(each).forEach(line -> out.println(each.label() + "  " + line));
       }
     }
     if (family != null) {

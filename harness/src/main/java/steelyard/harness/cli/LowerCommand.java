@@ -54,7 +54,7 @@ final class LowerCommand implements Callable<Integer> {
       throw new HarnessProblem("--format and --out go together");
     }
     PrintWriter out = spec.commandLine().getOut();
-    try (Desk desk = Desk.open(shared.familyJars)) {
+    try (Desk desk = Desk.open(shared.jars())) {
       RunPlan plan = candidate.plan(desk.catalogue(), Goal.optimise());
       Path folder = Files.createTempDirectory("steelyard-lower");
       try {

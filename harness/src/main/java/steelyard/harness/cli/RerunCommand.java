@@ -56,7 +56,7 @@ final class RerunCommand implements Callable<Integer> {
     try (Ledger ledger = Ledger.read(shared.file())) {
       before = ledger.runs().record(run);
     }
-    try (Desk desk = Desk.open(shared.familyJars)) {
+    try (Desk desk = Desk.open(shared.jars())) {
       RunPlan plan = plan(before, desk.catalogue());
       Path folder = Files.createTempDirectory("steelyard-rerun");
       try {
@@ -78,7 +78,7 @@ final class RerunCommand implements Callable<Integer> {
 
   private static RunPlan plan(RunRecord before, Catalogue catalogue) {
     Catalogue.Backend backend = SingleChoice.backend(catalogue, before.backend().adapter());
-    SingleChoice.family(catalogue, before.recipe().family());
+    SingleChoice.variant(catalogue, before.recipe().family(), before.recipe().variant());
     return new RunPlan(
         RunIds.next(),
         before.key(),

@@ -3,6 +3,7 @@ package steelyard.harness.cli;
 import java.nio.file.Path;
 import java.util.List;
 import picocli.CommandLine.Option;
+import steelyard.harness.sweep.FamilyJars;
 
 /** Options that every command takes. */
 final class Shared {
@@ -15,12 +16,19 @@ final class Shared {
 
   @Option(
       names = "--family-jar",
-      paramLabel = "JAR",
-      description = "A jar with families of your own; may be given several times.")
-  List<Path> familyJars = List.of();
+      paramLabel = "[ALIAS=]JAR",
+      description =
+          "A jar with families of your own; may be given several times. With an alias its variants"
+              + " are named plain@ALIAS.")
+  List<String> familyJars = List.of();
 
   @Option(names = "--debug", description = "Show where a mistake of this program was made.")
   boolean debug;
+
+  /** The jars that were given. */
+  FamilyJars jars() {
+    return FamilyJars.of(familyJars);
+  }
 
   /** The ledger's file. */
   Path file() {

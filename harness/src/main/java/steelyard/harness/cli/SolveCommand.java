@@ -61,7 +61,7 @@ final class SolveCommand implements Callable<Integer> {
   @Override
   public Integer call() throws IOException {
     PrintWriter out = spec.commandLine().getOut();
-    try (Desk desk = Desk.open(shared.familyJars)) {
+    try (Desk desk = Desk.open(shared.jars())) {
       RunPlan plan = candidate.plan(desk.catalogue(), Goal.optimise());
       Path folder = Files.createTempDirectory("steelyard-solve");
       try {
@@ -110,7 +110,7 @@ final class SolveCommand implements Callable<Integer> {
             Judges.code(desk.crew().installation()),
             JUDGING,
             desk.clock())) {
-      return Optional.of(judge.judge(record.run(), folder.resolve(record.run())));
+      return Optional.of(judge.judge(record, folder.resolve(record.run())));
     }
   }
 

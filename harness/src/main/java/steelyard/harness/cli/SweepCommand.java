@@ -59,7 +59,7 @@ final class SweepCommand implements Callable<Integer> {
   public Integer call() {
     PrintWriter out = spec.commandLine().getOut();
     PrintWriter err = spec.commandLine().getErr();
-    try (Desk desk = Desk.open(shared.familyJars)) {
+    try (Desk desk = Desk.open(SweepFile.familyJars(file).with(shared.jars()))) {
       Sweep sweep = SweepFile.read(file, desk.catalogue());
       sweep.remarks().forEach(remark -> err.println(Columns.visible(remark)));
       Plan plan = Plan.of(sweep);

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import picocli.CommandLine.IVersionProvider;
 import steelyard.harness.sweep.Catalogue;
+import steelyard.harness.sweep.FamilyJars;
 
 /** Our own version and those of all solvers that are installed. */
 final class Versions implements IVersionProvider {
@@ -20,7 +21,7 @@ final class Versions implements IVersionProvider {
     List<String> lines = new ArrayList<>();
     lines.add("steelyard " + OWN);
     lines.add("java " + Runtime.version());
-    try (Desk desk = Desk.open(List.of())) {
+    try (Desk desk = Desk.open(FamilyJars.none())) {
       Catalogue catalogue = desk.catalogue();
       catalogue.backends().forEach(b -> lines.add(b.name() + " " + b.version()));
       catalogue.missing().forEach(m -> lines.add(m.name() + " cannot run: " + m.reason()));

@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeSet;
 import steelyard.adapters.spi.Description;
 import steelyard.harness.sweep.Catalogue;
@@ -64,8 +65,10 @@ public final class Describing {
   }
 
   private Catalogue ask(Path file) {
-    Catalogue catalogue =
-        of(Errands.once(crew, this::task).orThrow("describing what is installed"));
+    Catalogue catalogue = of(describe(Optional.empty()));
+    for (String alias : crew.installation().aliases()) {
+      catalogue = beside(catalogue, describe(Optional.of(alias)), alias);
+    }
     // Folders of classes change without their own time of change.
     if (crew.installation().isPacked()) {
       keep(catalogue, file);
@@ -73,17 +76,35 @@ public final class Describing {
     return catalogue;
   }
 
-  private WorkerTask task(Path folder) {
+  private WorkerEnd describe(Optional<String> alias) {
+    return Errands.once(crew, folder -> task(folder, alias))
+        .orThrow("describing what is installed" + alias.map(a -> " as " + a).orElse(""));
+  }
+
+  private WorkerTask task(Path folder, Optional<String> alias) {
     return new WorkerTask(
         "describe",
         List.of("describe"),
         folder,
-        crew.installation().everything(),
+        crew.installation().everything(alias),
         "",
         HEAP_SHARE,
         1,
         List.of(),
         Crew.service(WITHIN, MEMORY_BYTES));
+  }
+
+  /** The catalogue with the families that only a version's jars have. */
+  private Catalogue beside(Catalogue catalogue, WorkerEnd end, String alias) {
+    CodeDigests code = new CodeDigests(crew.installation());
+    List<Catalogue.Family> families = new ArrayList<>(catalogue.families());
+    end.all(Event.Family.class)
+        .filter(family -> !crew.installation().core().contains(Path.of(family.place())))
+        .forEach(family -> families.add(family(family, Optional.of(alias), code)));
+    if (families.size() == catalogue.families().size()) {
+      throw new HarnessProblem("the jars given as " + alias + " hold no family");
+    }
+    return new Catalogue(families, catalogue.backends(), catalogue.missing());
   }
 
   private static void keep(Catalogue catalogue, Path file) {
@@ -99,7 +120,8 @@ public final class Describing {
   private Catalogue of(WorkerEnd end) {
     CodeDigests code = new CodeDigests(crew.installation());
     List<Catalogue.Family> families = new ArrayList<>();
-    end.all(Event.Family.class).forEach(family -> families.add(family(family, code)));
+    end.all(Event.Family.class)
+        .forEach(family -> families.add(family(family, Optional.empty(), code)));
     List<Catalogue.Backend> backends = new ArrayList<>();
     end.all(Event.Backend.class).forEach(b -> backends.add(backend(b.description(), code)));
     List<Catalogue.Missing> missing = new ArrayList<>();
@@ -108,9 +130,10 @@ public final class Describing {
     return new Catalogue(families, backends, missing);
   }
 
-  private Catalogue.Family family(Event.Family it, CodeDigests code) {
+  private Catalogue.Family family(Event.Family it, Optional<String> alias, CodeDigests code) {
     return new Catalogue.Family(
         it.name(),
+        alias,
         it.summary(),
         code.family(Path.of(it.place()), it.inside()),
         crew.installation().instances(it.name()),

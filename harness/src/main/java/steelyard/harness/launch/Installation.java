@@ -26,13 +26,14 @@ import steelyard.harness.process.ClassPath;
  *
  * @param core jars, or folders of classes while developing
  * @param backends the jars of each backend that has any
- * @param families jars of families that somebody named
+ * @param families jars of families that somebody named, by alias; those without one under the empty
+ *     text
  * @param share where shared files lie; empty while developing without any
  */
 public record Installation(
     List<Path> core,
     SortedMap<String, List<Path>> backends,
-    List<Path> families,
+    SortedMap<String, List<Path>> families,
     Optional<Path> share) {
 
   /** Names the folder of the installation; set by the start script. */
@@ -44,7 +45,7 @@ public record Installation(
   public Installation {
     core = List.copyOf(core);
     backends = Collections.unmodifiableSortedMap(new TreeMap<>(backends));
-    families = List.copyOf(families);
+    families = Collections.unmodifiableSortedMap(new TreeMap<>(families));
   }
 
   /**
@@ -61,7 +62,7 @@ public record Installation(
               .map(entry -> Path.of(entry).toAbsolutePath())
               .toList();
       Optional<Path> share = Optional.ofNullable(System.getProperty(SHARE)).map(Path::of);
-      return new Installation(path, new TreeMap<>(), List.of(), share);
+      return new Installation(path, new TreeMap<>(), new TreeMap<>(), share);
     }
     return in(Path.of(home).toAbsolutePath());
   }
@@ -73,7 +74,7 @@ public record Installation(
       backends.put(folder.getFileName().toString(), jars(folder));
     }
     return new Installation(
-        jars(lib.resolve("core")), backends, List.of(), Optional.of(home.resolve("share")));
+        jars(lib.resolve("core")), backends, new TreeMap<>(), Optional.of(home.resolve("share")));
   }
 
   private static List<Path> jars(Path folder) {
@@ -94,8 +95,8 @@ public record Installation(
    *
    * @throws HarnessProblem if one is not there
    */
-  public Installation with(List<Path> jars) {
-    for (Path jar : jars) {
+  public Installation with(SortedMap<String, List<Path>> jars) {
+    for (Path jar : jars.values().stream().flatMap(List::stream).toList()) {
       if (!Files.isReadable(jar)) {
         throw new HarnessProblem("cannot read the family jar " + jar);
       }
@@ -103,19 +104,38 @@ public record Installation(
     return new Installation(core, backends, jars, share);
   }
 
-  /** What the workers of a backend load. */
-  public ClassPath classPath(String backend) {
-    return new ClassPath(core, backends.getOrDefault(backend, List.of()), families);
+  /** What the workers of a backend load that run a version of a family. */
+  public ClassPath classPath(String backend, Optional<String> alias) {
+    return new ClassPath(core, backends.getOrDefault(backend, List.of()), families(alias));
   }
 
   /** What a worker loads that asks no solver. */
-  public ClassPath withoutBackends() {
-    return new ClassPath(core, List.of(), families);
+  public ClassPath withoutBackends(Optional<String> alias) {
+    return new ClassPath(core, List.of(), families(alias));
   }
 
   /** What a worker loads that describes everything. */
-  public ClassPath everything() {
-    return new ClassPath(core, backends.values().stream().flatMap(List::stream).toList(), families);
+  public ClassPath everything(Optional<String> alias) {
+    List<Path> libraries = backends.values().stream().flatMap(List::stream).toList();
+    return new ClassPath(core, libraries, families(alias));
+  }
+
+  /** The jars of one version; versions never see each other. */
+  private List<Path> families(Optional<String> alias) {
+    return families.getOrDefault(alias.orElse(""), List.of());
+  }
+
+  /** The names of versions of families that stand beside the one without a name. */
+  public List<String> aliases() {
+    return families.keySet().stream().filter(alias -> !alias.isEmpty()).toList();
+  }
+
+  private Stream<Path> jars() {
+    return Stream.of(
+            everything(Optional.empty()).jars(),
+            families.values().stream().flatMap(List::stream).toList())
+        .flatMap(List::stream)
+        .distinct();
   }
 
   /** Whether classes come from jars, as an archive of classes needs. */
@@ -132,14 +152,12 @@ public record Installation(
 
   /** A jar of the class path whose file name begins with {@code start}. */
   public Optional<Path> jar(String start) {
-    return everything().jars().stream()
-        .filter(path -> path.getFileName().toString().startsWith(start))
-        .findFirst();
+    return jars().filter(path -> path.getFileName().toString().startsWith(start)).findFirst();
   }
 
   /** The installed files as {@code name -> size and time of change}: what caches depend on. */
   SortedMap<String, String> fingerprint() {
-    return everything().jars().stream()
+    return jars()
         .collect(Collectors.toMap(Path::toString, Installation::stamp, (a, b) -> a, TreeMap::new));
   }
 

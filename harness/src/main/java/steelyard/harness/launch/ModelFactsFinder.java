@@ -1,5 +1,7 @@
 package steelyard.harness.launch;
 
+import static java.util.stream.Collectors.toList;
+
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
@@ -14,6 +16,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import java.util.stream.Collectors;
 import steelyard.harness.process.Exit;
 import steelyard.harness.process.ProcessLimits;
 import steelyard.harness.worker.Event;
@@ -78,9 +81,13 @@ public final class ModelFactsFinder {
     wanted.forEach(
         (key, recipe) ->
             memory.find(key).ifPresentOrElse(m -> known.put(key, m), () -> open.add(recipe)));
-    for (int from = 0; from < open.size() && !crew.stop().stopping(); from += BATCH) {
-      done.of(known.size(), wanted.size());
-      build(open.subList(from, Math.min(open.size(), from + BATCH)), known);
+    Map<Optional<String>, List<Recipe>> byVersion =
+        open.stream().collect(Collectors.groupingBy(Recipe::alias, LinkedHashMap::new, toList()));
+    for (List<Recipe> version : byVersion.values()) {
+      for (int from = 0; from < version.size() && !crew.stop().stopping(); from += BATCH) {
+        done.of(known.size(), wanted.size());
+        build(version.subList(from, Math.min(version.size(), from + BATCH)), known);
+      }
     }
     done.of(known.size(), wanted.size());
     return known;
@@ -139,7 +146,7 @@ public final class ModelFactsFinder {
         "digest",
         List.of("digest", file.toString()),
         folder,
-        crew.installation().withoutBackends(),
+        crew.installation().withoutBackends(recipes.get(0).alias()),
         "",
         HEAP_SHARE,
         1,

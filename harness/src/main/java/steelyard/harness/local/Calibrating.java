@@ -52,7 +52,7 @@ final class Calibrating {
                     "calibrate",
                     List.of("calibrate"),
                     folder,
-                    crew.installation().withoutBackends(),
+                    crew.installation().withoutBackends(Optional.empty()),
                     "",
                     HEAP_SHARE,
                     1,

@@ -5,7 +5,9 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Duration;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.locks.LockSupport;
@@ -16,10 +18,12 @@ import steelyard.harness.worker.Verdict;
 import steelyard.harness.worker.Wire;
 import steelyard.results.ledger.Check;
 import steelyard.results.ledger.Digest;
+import steelyard.results.ledger.RunRecord;
 
 /**
- * Has solutions judged by one long-lived process apart from the runs. A judge that hangs or dies is
- * ended and started anew; what it was asked then stays unchecked.
+ * Has solutions judged by long-lived processes apart from the runs, one for each version of a
+ * family. A judge that hangs or dies is ended and started anew; what it was asked then stays
+ * unchecked.
  */
 public final class JudgeService implements AutoCloseable {
   private static final Duration LIFE = Duration.ofDays(30);
@@ -32,7 +36,7 @@ public final class JudgeService implements AutoCloseable {
   private final Digest code;
   private final Duration limit;
   private final Clock clock;
-  private Optional<RunningProcess> process = Optional.empty();
+  private final Map<Optional<String>, RunningProcess> processes = new HashMap<>();
 
   /**
    * A judge that is started when it is first asked.
@@ -57,9 +61,10 @@ public final class JudgeService implements AutoCloseable {
    */
   public record Judged(steelyard.results.ledger.Verdict verdict, Optional<Verdict> found) {}
 
-  /** Judges the solutions of the run in {@code runFolder}. */
-  public synchronized Judged judge(String run, Path runFolder) {
-    Optional<Verdict> found = ask(runFolder);
+  /** Judges the solutions of a run, whose files lie in {@code runFolder}. */
+  public synchronized Judged judge(RunRecord record, Path runFolder) {
+    String run = record.run();
+    Optional<Verdict> found = ask(record.recipe().alias(), runFolder);
     if (found.isEmpty()) {
       return judged(run, Check.UNCHECKED, "the judge gave no answer within " + limit, found);
     }
@@ -77,10 +82,9 @@ public final class JudgeService implements AutoCloseable {
         new steelyard.results.ledger.Verdict(run, code, check, detail, clock.instant()), found);
   }
 
-  private Optional<Verdict> ask(Path runFolder) {
+  private Optional<Verdict> ask(Optional<String> alias, Path runFolder) {
     Path file = runFolder.resolve(Wire.VERDICT);
-    RunningProcess judge = process.orElseGet(this::start);
-    process = Optional.of(judge);
+    RunningProcess judge = processes.computeIfAbsent(alias, this::start);
     judge.tell(runFolder.toString());
     long end = System.nanoTime() + limit.toNanos();
     while (!Files.exists(file) && System.nanoTime() - end < 0 && judge.isAlive()) {
@@ -92,20 +96,20 @@ public final class JudgeService implements AutoCloseable {
       }
     } catch (IOException e) {
       // Not a verdict: as if there were none.
-      close();
+      end(alias);
       return Optional.empty();
     }
-    close();
+    end(alias);
     return Optional.empty();
   }
 
-  private RunningProcess start() {
+  private RunningProcess start(Optional<String> alias) {
     return crew.start(
         new WorkerTask(
             "judge",
             List.of("judge"),
-            folder,
-            crew.installation().withoutBackends(),
+            alias.map(name -> folder.resolve("version-" + name)).orElse(folder),
+            crew.installation().withoutBackends(alias),
             "",
             HEAP_SHARE,
             1,
@@ -113,9 +117,12 @@ public final class JudgeService implements AutoCloseable {
             Crew.service(LIFE, MEMORY_BYTES)));
   }
 
+  private void end(Optional<String> alias) {
+    Optional.ofNullable(processes.remove(alias)).ifPresent(RunningProcess::endNow);
+  }
+
   @Override
   public synchronized void close() {
-    process.ifPresent(RunningProcess::endNow);
-    process = Optional.empty();
+    List.copyOf(processes.keySet()).forEach(this::end);
   }
 }

@@ -83,7 +83,8 @@ public final class KeyedPlan {
         for (Candidate candidate : contest.candidates()) {
           memo(contest, candidate, instance)
               .failure()
-              .ifPresent(r -> failures.put(candidate.variant() + " of " + instance.name(), r));
+              .ifPresent(
+                  r -> failures.put(candidate.variant().name() + " of " + instance.name(), r));
         }
       }
     }

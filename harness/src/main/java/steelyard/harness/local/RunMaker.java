@@ -105,7 +105,7 @@ public final class RunMaker {
         plan.run(),
         arguments,
         folder,
-        crew.installation().classPath(plan.setup().backend().adapter()),
+        crew.installation().classPath(plan.setup().backend().adapter(), plan.recipe().alias()),
         plan.setup().backend().adapter(),
         plan.heapShare(),
         plan.setup().threads(),

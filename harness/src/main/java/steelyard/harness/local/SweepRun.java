@@ -242,7 +242,7 @@ public final class SweepRun {
       Path folder = runs.resolve(record.run());
       Check check = Check.UNCHECKED;
       if (record.outcome().hasSolution()) {
-        JudgeService.Judged judged = judging.judge(record.run(), folder);
+        JudgeService.Judged judged = judging.judge(record, folder);
         ledger.judging().add(judged.verdict());
         check = judged.verdict().check();
       }

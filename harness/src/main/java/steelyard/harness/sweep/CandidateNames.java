@@ -13,10 +13,10 @@ final class CandidateNames {
 
   private static final Pattern NAME = Pattern.compile("(.+?)\\s+on\\s+(\\S+)");
 
-  private final Catalogue.Family family;
+  private final FamilyVersions family;
   private final Map<String, Candidate> byName = new LinkedHashMap<>();
 
-  CandidateNames(Catalogue.Family family, List<Candidate> candidates) {
+  CandidateNames(FamilyVersions family, List<Candidate> candidates) {
     this.family = family;
     candidates.forEach(candidate -> byName.put(candidate.name(), candidate));
   }
@@ -40,9 +40,16 @@ final class CandidateNames {
     if (!matcher.matches()) {
       return text;
     }
-    List<String> parts = VariantsReader.parts(matcher.group(1));
-    List<String> amendments = family.inOrder(parts.subList(1, parts.size()));
-    boolean whole = parts.get(0).equals(Candidate.PLAIN) && amendments.size() == parts.size() - 1;
-    return (whole ? Candidate.variant(amendments) : matcher.group(1)) + " on " + matcher.group(2);
+    return ordered(FamilyVersions.Parts.of(matcher.group(1))).orElse(matcher.group(1))
+        + " on "
+        + matcher.group(2);
+  }
+
+  private Optional<String> ordered(FamilyVersions.Parts parts) {
+    return family
+        .of(parts.alias())
+        .map(version -> version.inOrder(parts.amendments()))
+        .filter(chosen -> parts.isPlain() && chosen.size() == parts.amendments().size())
+        .map(chosen -> new Variant(chosen, parts.alias()).name());
   }
 }

@@ -19,7 +19,7 @@ import steelyard.results.ledger.Digest;
 /**
  * What there is to compare and to compare on, as workers described it.
  *
- * @param families by unique names
+ * @param families by unique names and aliases
  * @param backends those that can run, by unique names
  * @param missing backends that are known and cannot run here
  */
@@ -28,6 +28,7 @@ public record Catalogue(List<Family> families, List<Backend> backends, List<Miss
   /**
    * A family as its code describes itself.
    *
+   * @param alias the name of the version, where several stand side by side
    * @param summary one line
    * @param code digest of the family's code
    * @param instances the folder of the instances that it ships; empty if it ships none
@@ -35,6 +36,7 @@ public record Catalogue(List<Family> families, List<Backend> backends, List<Miss
    */
   public record Family(
       String name,
+      Optional<String> alias,
       String summary,
       Digest code,
       Optional<Path> instances,
@@ -42,6 +44,7 @@ public record Catalogue(List<Family> families, List<Backend> backends, List<Miss
 
     public Family {
       Objects.requireNonNull(name, "name");
+      Objects.requireNonNull(alias, "alias");
       Objects.requireNonNull(summary, "summary");
       Objects.requireNonNull(code, "code");
       Objects.requireNonNull(instances, "instances");
@@ -61,6 +64,11 @@ public record Catalogue(List<Family> families, List<Backend> backends, List<Miss
             "family %s: amendment %s requires or excludes one that does not exist: %s"
                 .formatted(family, amendment.name(), named));
       }
+    }
+
+    /** {@code workshop}, or {@code workshop@old}. */
+    public String label() {
+      return alias.map(version -> name + Variant.AT + version).orElse(name);
     }
 
     /** The amendments' names in order of declaration. */
@@ -208,7 +216,7 @@ public record Catalogue(List<Family> families, List<Backend> backends, List<Miss
     families = List.copyOf(families);
     backends = List.copyOf(backends);
     missing = List.copyOf(missing);
-    requireUnique("family", families.stream().map(Family::name).toList());
+    requireUnique("family", families.stream().map(Family::label).toList());
     List<String> names = new ArrayList<>(backends.stream().map(Backend::name).toList());
     names.addAll(missing.stream().map(Missing::name).toList());
     requireUnique("backend", names);
@@ -218,11 +226,6 @@ public record Catalogue(List<Family> families, List<Backend> backends, List<Miss
     if (new HashSet<>(names).size() < names.size()) {
       throw new IllegalArgumentException("a " + kind + " is described twice: " + names);
     }
-  }
-
-  /** The family of this name. */
-  public Optional<Family> family(String name) {
-    return families.stream().filter(f -> f.name().equals(name)).findFirst();
   }
 
   /** The backend of this name that can run. */

@@ -1,9 +1,12 @@
 package steelyard.harness.sweep;
 
+import java.util.Collections;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.SortedMap;
+import java.util.TreeMap;
 import steelyard.results.ledger.Digest;
 import steelyard.results.ledger.Recipe;
 
@@ -11,7 +14,7 @@ import steelyard.results.ledger.Recipe;
  * One family's part of a sweep: who is compared on what.
  *
  * @param family the family's name
- * @param code digest of the family's code
+ * @param codes digest of the family's code by alias; that without one under the empty text
  * @param candidates each once, in the order of the sweep file; at least one
  * @param inService the candidate that the others are held against; one of them
  * @param pairs what is to be shown before against after
@@ -20,7 +23,7 @@ import steelyard.results.ledger.Recipe;
  */
 public record Contest(
     String family,
-    Digest code,
+    SortedMap<String, Digest> codes,
     List<Candidate> candidates,
     Candidate inService,
     List<Pair> pairs,
@@ -29,10 +32,16 @@ public record Contest(
 
   public Contest {
     Objects.requireNonNull(family, "family");
-    Objects.requireNonNull(code, "code");
+    codes = Collections.unmodifiableSortedMap(new TreeMap<>(codes));
     candidates = List.copyOf(candidates);
     pairs = List.copyOf(pairs);
     instances = List.copyOf(instances);
+    for (Candidate candidate : candidates) {
+      Optional<String> alias = candidate.variant().alias();
+      if (alias.isPresent() && !codes.containsKey(alias.get())) {
+        throw new IllegalArgumentException("no code for " + candidate);
+      }
+    }
     if (!candidates.contains(inService)) {
       throw new IllegalArgumentException(inService + " is in service and not a candidate");
     }
@@ -52,12 +61,17 @@ public record Contest(
 
   /** How a candidate's model on an instance is made. */
   public Recipe recipe(Candidate candidate, Instance instance) {
+    Variant variant = candidate.variant();
     return new Recipe(
         family,
-        Optional.empty(),
-        code,
+        variant.alias(),
+        codes.get(variant.alias().orElse(onlyAlias())),
         instance.forRecipe(),
-        candidate.amendments(),
-        candidate.variant());
+        variant.amendments(),
+        variant.name());
+  }
+
+  private String onlyAlias() {
+    return codes.size() == 1 ? codes.firstKey() : "";
   }
 }

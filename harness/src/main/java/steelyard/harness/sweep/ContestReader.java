@@ -49,7 +49,7 @@ final class ContestReader {
   Optional<Contest> read(Field whole, Keys keys) {
     Optional<Field> named = keys.required("family", "family: workshop");
     Optional<Field> variants = keys.required("variants", "variants: {one-at-a-time: all}");
-    Optional<Catalogue.Family> family = named.flatMap(this::family);
+    Optional<FamilyVersions> family = named.flatMap(this::family);
     if (family.isEmpty() || variants.isEmpty()) {
       return Optional.empty();
     }
@@ -58,15 +58,16 @@ final class ContestReader {
     List<Candidate> candidates =
         mistakes.count() == before ? candidates(variants.get(), chosen) : List.of();
     List<Instance> instances =
-        new InstancesReader(base, family.get(), mistakes).read(keys.optional("instances"), whole);
+        new InstancesReader(base, family.get().main(), mistakes)
+            .read(keys.optional("instances"), whole);
     return candidates.isEmpty()
         ? Optional.empty()
         : contest(keys, family.get(), candidates, instances, chosen.leftOut());
   }
 
-  private Optional<Catalogue.Family> family(Field field) {
+  private Optional<FamilyVersions> family(Field field) {
     Optional<String> name = field.text();
-    Optional<Catalogue.Family> family = name.flatMap(catalogue::family);
+    Optional<FamilyVersions> family = name.flatMap(it -> FamilyVersions.find(catalogue, it));
     if (name.isPresent() && family.isEmpty()) {
       field.unknown(
           "family", name.get(), catalogue.families().stream().map(f -> f.name()).toList());
@@ -76,8 +77,8 @@ final class ContestReader {
 
   private List<Candidate> candidates(Field field, VariantsReader.Chosen chosen) {
     List<Candidate> candidates = new ArrayList<>();
-    for (List<String> amendments : chosen.variants()) {
-      setups.forEach(setup -> candidates.add(new Candidate(amendments, setup)));
+    for (Variant variant : chosen.variants()) {
+      setups.forEach(setup -> candidates.add(new Candidate(variant, setup)));
     }
     if (candidates.size() > MOST_CANDIDATES) {
       field.mistake(
@@ -94,7 +95,7 @@ final class ContestReader {
 
   private Optional<Contest> contest(
       Keys keys,
-      Catalogue.Family family,
+      FamilyVersions family,
       List<Candidate> candidates,
       List<Instance> instances,
       int leftOut) {
@@ -119,13 +120,13 @@ final class ContestReader {
     }
     return Optional.of(
         new Contest(
-            family.name(), family.code(), candidates, inService.get(), pairs, instances, leftOut));
+            family.name(), family.codes(), candidates, inService.get(), pairs, instances, leftOut));
   }
 
   /** Plain on the first backend; the first candidate where plain does not take part. */
   private static Candidate byDefault(List<Candidate> candidates) {
     return candidates.stream()
-        .filter(candidate -> candidate.amendments().isEmpty())
+        .filter(candidate -> candidate.variant().amendments().isEmpty())
         .findFirst()
         .orElse(candidates.get(0));
   }

@@ -3,8 +3,6 @@ package steelyard.harness.sweep;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.Collection;
 import java.util.List;
 import java.util.Map;
@@ -25,20 +23,22 @@ import steelyard.results.ledger.Observation;
 public final class SingleChoice {
   private SingleChoice() {}
 
+  /** A variant, and the version of the family that it belongs to. */
+  public record Chosen(Catalogue.Family family, Variant variant) {}
+
   /**
-   * The family of that name.
+   * The family of that name; that without an alias where there are several versions.
    *
    * @throws SweepProblem if there is none
    */
   public static Catalogue.Family family(Catalogue catalogue, String name) {
-    return catalogue
-        .family(name)
-        .orElseThrow(
-            () ->
-                unknown(
-                    "family",
-                    name,
-                    catalogue.families().stream().map(Catalogue.Family::name).toList()));
+    return versions(catalogue, name).main();
+  }
+
+  private static FamilyVersions versions(Catalogue catalogue, String name) {
+    List<String> known =
+        catalogue.families().stream().map(Catalogue.Family::name).distinct().toList();
+    return FamilyVersions.find(catalogue, name).orElseThrow(() -> unknown("family", name, known));
   }
 
   /**
@@ -107,30 +107,47 @@ public final class SingleChoice {
   }
 
   /**
-   * The amendments of a variant such as {@code plain+a+b}, in order of declaration.
+   * The variant of a name such as {@code plain+a+b} or {@code plain+a@old}.
    *
    * @throws SweepProblem if one is unknown or they cannot be combined
    */
-  public static List<String> amendments(Catalogue.Family family, String variant) {
-    List<String> parts = new ArrayList<>(Arrays.asList(variant.split("\\+", -1)));
-    if (!parts.remove(0).equals(Candidate.PLAIN)) {
+  public static Chosen variant(Catalogue catalogue, String family, String text) {
+    FamilyVersions versions = versions(catalogue, family);
+    FamilyVersions.Parts parts = FamilyVersions.Parts.of(text);
+    Catalogue.Family version =
+        versions.of(parts.alias()).orElseThrow(() -> noVersion(versions, parts.alias()));
+    if (!parts.isPlain()) {
       throw new SweepProblem(
           List.of(
               "a variant begins with 'plain', as in plain+"
-                  + family.names().stream().findFirst().orElse("amendment")
+                  + version.names().stream().findFirst().orElse("amendment")
                   + ", not "
-                  + Phrases.quoted(variant)));
+                  + Phrases.quoted(text)));
     }
-    for (String part : parts) {
-      if (!family.names().contains(part)) {
-        throw unknown("amendment", part, family.names());
+    for (String part : parts.amendments()) {
+      if (!version.names().contains(part)) {
+        throw unknown("amendment", part, version.names());
       }
     }
-    Optional<String> conflict = family.conflict(parts);
+    Optional<String> conflict = version.conflict(parts.amendments());
     if (conflict.isPresent()) {
-      throw new SweepProblem(List.of("variant " + Phrases.quoted(variant) + ": " + conflict.get()));
+      throw new SweepProblem(List.of("variant " + Phrases.quoted(text) + ": " + conflict.get()));
     }
-    return family.inOrder(parts);
+    return new Chosen(version, new Variant(version.inOrder(parts.amendments()), parts.alias()));
+  }
+
+  private static SweepProblem noVersion(FamilyVersions versions, Optional<String> alias) {
+    return alias
+        .map(name -> unknown("version of " + versions.name(), name, versions.aliases()))
+        .orElseGet(
+            () ->
+                new SweepProblem(
+                    List.of(
+                        "which version of "
+                            + versions.name()
+                            + "? give --variant plain@"
+                            + versions.aliases().get(0),
+                        "  " + Phrases.known(versions.aliases()))));
   }
 
   /**

@@ -1,6 +1,7 @@
 package steelyard.harness.sweep;
 
 import java.nio.file.Path;
+import java.util.Optional;
 import steelyard.harness.sweep.text.Field;
 import steelyard.harness.sweep.text.Mistakes;
 import steelyard.harness.sweep.text.SweepProblem;
@@ -26,6 +27,8 @@ import steelyard.harness.sweep.text.Utf8;
  * <tr><td>family</td><td>one family's name; or
  *     {@code families}: a list of entries that have family, variants, instances, in-service and
  *     pairs of their own</td></tr>
+ * <tr><td>family-jars</td><td>jars with families of your own: a path, a list, or by alias, {@code
+ *     {old: a.jar, new: b.jar}}, after which {@code plain@old} is a variant</td></tr>
  * <tr><td>variants</td><td>names such as {@code plain} and {@code plain+a+b};
  *     {@code {all-subsets-of: [a, b]}}, {@code {one-at-a-time: [a, b]}}, with {@code all} for the
  *     whole list, and {@code onto: plain+c} for what they are added to; or a list of all
@@ -37,7 +40,8 @@ import steelyard.harness.sweep.text.Utf8;
  * <tr><td>seeds</td><td>a count or a list; seed 0 by default</td></tr>
  * <tr><td>limits</td><td>{@code wall} (60 s), {@code memory} (2 GB), {@code threads} (1), and
  *     {@code work}: an amount for each backend, {@code {cpsat: 5 deterministic-seconds}}, under
- *     which wall is the safety net (600 s)</td></tr>
+ *     which wall is the safety net (600 s); {@code build} (60 s): reading an instance and building
+ *     its model</td></tr>
  * <tr><td>in-service</td><td>{@code VARIANT on NAME}; plain on the first backend by
  *     default</td></tr>
  * <tr><td>pairs</td><td>lists of before and after; each against the one in service by
@@ -57,6 +61,27 @@ public final class SweepFile {
   private static final int LARGEST = 1_000_000;
 
   private SweepFile() {}
+
+  /**
+   * The jars with families that a file names.
+   *
+   * @param file relative paths in it start from its folder
+   * @throws SweepProblem if it cannot be read, or a jar is not there
+   */
+  public static FamilyJars familyJars(Path file) {
+    String shown = file.toString();
+    Mistakes mistakes = new Mistakes();
+    Field root = Field.ofYaml(shown, Utf8.read(file, shown, LARGEST), mistakes);
+    Optional<Field> jars =
+        root.hasKeys()
+            ? Optional.ofNullable(root.entries().get(SweepReader.FAMILY_JARS))
+            : Optional.empty();
+    FamilyJars read =
+        jars.map(field -> FamilyJars.read(field, file.toAbsolutePath().getParent()))
+            .orElse(FamilyJars.none());
+    mistakes.throwIfAny();
+    return read;
+  }
 
   /**
    * The sweep that a file describes. Reads also the instances that it names.

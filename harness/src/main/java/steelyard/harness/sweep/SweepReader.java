@@ -19,10 +19,13 @@ import steelyard.results.statistics.TieMargin;
 /** Reads the tree of a sweep file against a catalogue; every default of the format stands here. */
 final class SweepReader {
 
+  static final String FAMILY_JARS = "family-jars";
+
   private static final List<String> SHARED =
       List.of(
           "name",
           "notes",
+          FAMILY_JARS,
           "families",
           "backends",
           "seeds",

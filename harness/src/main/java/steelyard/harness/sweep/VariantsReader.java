@@ -1,7 +1,6 @@
 package steelyard.harness.sweep;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -29,17 +28,17 @@ final class VariantsReader {
   /**
    * What was chosen.
    *
-   * @param variants the amendments of each, in order of declaration; each variant once
+   * @param variants each once, its amendments in order of declaration
    * @param leftOut how many combinations were left out
    */
-  record Chosen(List<List<String>> variants, int leftOut) {}
+  record Chosen(List<Variant> variants, int leftOut) {}
 
-  private final Catalogue.Family family;
-  private final Set<List<String>> variants = new LinkedHashSet<>();
+  private final FamilyVersions versions;
+  private final Set<Variant> variants = new LinkedHashSet<>();
   private int leftOut;
 
-  VariantsReader(Catalogue.Family family) {
-    this.family = family;
+  VariantsReader(FamilyVersions versions) {
+    this.versions = versions;
   }
 
   Chosen read(Field field) {
@@ -53,37 +52,59 @@ final class VariantsReader {
     return new Chosen(List.copyOf(variants), leftOut);
   }
 
-  /** The amendments of a variant by its name; empty, and a mistake, if there is no such variant. */
-  private Optional<List<String>> named(Field field) {
-    Optional<String> text = field.text();
-    if (text.isEmpty()) {
+  /** The variant of that name; empty, and a mistake, if there is none. */
+  private Optional<Variant> named(Field field) {
+    return base(field).map(Based::variant);
+  }
+
+  /** A variant together with the version of the family that it belongs to. */
+  private record Based(Catalogue.Family family, Variant variant) {}
+
+  private Optional<Based> base(Field field) {
+    Optional<FamilyVersions.Parts> read = field.text().map(FamilyVersions.Parts::of);
+    if (read.isEmpty()) {
       return Optional.empty();
     }
-    List<String> parts = parts(text.get());
-    if (!parts.get(0).equals(Candidate.PLAIN)) {
-      String fix = family.names().contains(parts.get(0)) ? "; write plain+" + text.get() : "";
+    FamilyVersions.Parts parts = read.get();
+    Optional<Catalogue.Family> family = version(field, parts.alias());
+    if (family.isPresent() && !parts.isPlain()) {
+      String text = field.text().orElse("");
+      String fix =
+          family.get().names().contains(parts.words().get(0)) ? "; write plain+" + text : "";
       field.mistake(
-          "a variant's name starts with 'plain', "
-              + Phrases.quoted(text.get())
-              + " does not"
-              + fix);
+          "a variant's name starts with 'plain', " + Phrases.quoted(text) + " does not" + fix);
       return Optional.empty();
     }
-    return amendments(field, parts.subList(1, parts.size()))
-        .filter(chosen -> isValid(field, chosen));
+    return family.flatMap(
+        it ->
+            amendments(field, it, parts.amendments())
+                .map(chosen -> new Variant(chosen, parts.alias()))
+                .filter(chosen -> isValid(field, it, chosen))
+                .map(chosen -> new Based(it, chosen)));
   }
 
-  static List<String> parts(String variant) {
-    return Arrays.stream(variant.split("\\+", -1)).map(String::strip).toList();
+  private Optional<Catalogue.Family> version(Field field, Optional<String> alias) {
+    Optional<Catalogue.Family> version = versions.of(alias);
+    if (version.isEmpty()) {
+      if (alias.isPresent()) {
+        field.unknown("version", alias.get(), versions.aliases());
+      } else {
+        field.mistake(
+            "which version of " + versions.name() + "? write plain@" + versions.aliases().get(0),
+            "its versions: " + String.join(", ", versions.aliases()));
+      }
+    }
+    return version;
   }
 
-  private boolean isValid(Field field, List<String> chosen) {
-    Optional<String> conflict = family.conflict(chosen);
-    conflict.ifPresent(why -> field.mistake(Candidate.variant(chosen) + " is no variant: " + why));
+  private static boolean isValid(Field field, Catalogue.Family family, Variant chosen) {
+    Optional<String> conflict = family.conflict(chosen.amendments());
+    conflict.ifPresent(why -> field.mistake(chosen.name() + " is no variant: " + why));
     return conflict.isEmpty();
   }
 
-  private Optional<List<String>> amendments(Field field, List<String> names) {
+  private static Optional<List<String>> amendments(
+      Field field, Catalogue.Family family, List<String> names) {
     for (String name : names) {
       if (!family.names().contains(name)) {
         field.unknown("amendment", name, family.names());
@@ -105,17 +126,22 @@ final class VariantsReader {
       item.mistake("says neither " + SUBSETS + " nor " + ONE);
     }
     Optional<Field> onto = keys.optional(ONTO);
-    Optional<List<String>> base = onto.isPresent() ? named(onto.get()) : Optional.of(List.of());
+    Optional<Based> base = onto.isPresent() ? base(onto.get()) : plain(item);
     if (base.isPresent()) {
-      variants.add(base.get());
-      one.flatMap(this::chosen).ifPresent(names -> addOneAtATime(one.get(), base.get(), names));
+      variants.add(base.get().variant());
+      one.flatMap(field -> chosen(field, base.get().family()))
+          .ifPresent(names -> addOneAtATime(one.get(), base.get(), names));
       subsets
-          .flatMap(this::chosen)
+          .flatMap(field -> chosen(field, base.get().family()))
           .ifPresent(names -> addSubsets(subsets.get(), base.get(), names));
     }
   }
 
-  private Optional<List<String>> chosen(Field field) {
+  private Optional<Based> plain(Field item) {
+    return version(item, Optional.empty()).map(family -> new Based(family, Variant.of(List.of())));
+  }
+
+  private static Optional<List<String>> chosen(Field field, Catalogue.Family family) {
     if (field.isSingle()) {
       Optional<String> text = field.text();
       if (text.isPresent() && text.get().equals(ALL)) {
@@ -130,7 +156,7 @@ final class VariantsReader {
     List<String> names = new ArrayList<>();
     for (Field item : field.items()) {
       Optional<String> name = item.text();
-      name.flatMap(n -> amendments(item, List.of(n))).ifPresent(names::addAll);
+      name.flatMap(n -> amendments(item, family, List.of(n))).ifPresent(names::addAll);
     }
     if (new HashSet<>(names).size() < names.size()) {
       field.mistake("an amendment comes twice");
@@ -139,34 +165,36 @@ final class VariantsReader {
     return Optional.of(names);
   }
 
-  private void addOneAtATime(Field field, List<String> base, List<String> names) {
+  private void addOneAtATime(Field field, Based base, List<String> names) {
+    Catalogue.Family family = base.family();
     for (String name : names) {
-      List<String> wanted = new ArrayList<>(base);
+      List<String> wanted = new ArrayList<>(base.variant().amendments());
       wanted.add(name);
-      List<String> chosen = family.withRequired(wanted);
-      if (field.isSingle() && family.conflict(chosen).isPresent()) {
+      Variant chosen = new Variant(family.withRequired(wanted), base.variant().alias());
+      if (field.isSingle() && family.conflict(chosen.amendments()).isPresent()) {
         leftOut++;
-      } else if (isValid(field, chosen)) {
+      } else if (isValid(field, family, chosen)) {
         variants.add(chosen);
       }
     }
   }
 
-  private void addSubsets(Field field, List<String> base, List<String> names) {
+  private void addSubsets(Field field, Based base, List<String> names) {
     if (names.size() > MOST_COMBINED) {
       field.mistake(names.size() + " amendments; at most " + MOST_COMBINED + " are combined");
       return;
     }
-    List<String> added = names.stream().filter(name -> !base.contains(name)).toList();
+    List<String> before = base.variant().amendments();
+    List<String> added = names.stream().filter(name -> !before.contains(name)).toList();
     for (int subset = 0; subset < 1 << added.size(); subset++) {
-      Set<String> wanted = new HashSet<>(base);
+      Set<String> wanted = new HashSet<>(before);
       for (int i = 0; i < added.size(); i++) {
         if ((subset >> i & 1) == 1) {
           wanted.add(added.get(i));
         }
       }
-      if (family.conflict(wanted).isEmpty()) {
-        variants.add(family.inOrder(wanted));
+      if (base.family().conflict(wanted).isEmpty()) {
+        variants.add(new Variant(base.family().inOrder(wanted), base.variant().alias()));
       } else {
         leftOut++;
       }

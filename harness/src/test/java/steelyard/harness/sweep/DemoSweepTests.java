@@ -24,6 +24,7 @@ class DemoSweepTests {
       families.add(
           new Catalogue.Family(
               family.name(),
+              Optional.empty(),
               family.summary(),
               Samples.digest(family.name()),
               Optional.of(INSTANCES.resolve(family.name())),

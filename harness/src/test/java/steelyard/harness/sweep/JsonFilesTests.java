@@ -32,7 +32,8 @@ class JsonFilesTests {
         "k3f9",
         "kiln plan \u00e9t\u00e9",
         Path.of("/shared/runs of spring"),
-        candidate -> candidate.variant().equals("plain") ? Optional.of(KEY) : Optional.empty());
+        candidate ->
+            candidate.variant().name().equals("plain") ? Optional.of(KEY) : Optional.empty());
   }
 
   private List<String> problem(String json) throws IOException {
@@ -134,6 +135,7 @@ class JsonFilesTests {
             () ->
                 new Catalogue.Family(
                     "f",
+                    Optional.empty(),
                     "",
                     Samples.digest("f"),
                     Optional.empty(),

@@ -220,7 +220,7 @@ class PlanTests {
     Contest contest =
         new Contest(
             "f",
-            drawn.code(),
+            drawn.codes(),
             drawn.candidates(),
             drawn.inService(),
             List.of(),
@@ -236,7 +236,7 @@ class PlanTests {
     Contest contest =
         new Contest(
             "f",
-            drawn.code(),
+            drawn.codes(),
             drawn.candidates(),
             drawn.inService(),
             List.of(),

@@ -11,6 +11,7 @@ import java.security.NoSuchAlgorithmException;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.Set;
@@ -49,6 +50,7 @@ final class Samples {
     Catalogue.Family kiln =
         new Catalogue.Family(
             "kiln",
+            Optional.empty(),
             "Lots of tiles into firings",
             digest("kiln code"),
             instances,
@@ -59,7 +61,12 @@ final class Samples {
                 amendment("glaze-first", "search", Set.of("load-bound"), Set.of())));
     Catalogue.Family yard =
         new Catalogue.Family(
-            "yard", "Pallets into trucks", digest("yard code"), Optional.empty(), List.of());
+            "yard",
+            Optional.empty(),
+            "Pallets into trucks",
+            digest("yard code"),
+            Optional.empty(),
+            List.of());
     return new Catalogue(
         List.of(kiln, yard),
         List.of(
@@ -142,7 +149,7 @@ final class Samples {
       UniformRandomProvider random, String family, int candidates, int instances, int classes) {
     List<Candidate> all = new ArrayList<>();
     for (int i = 0; i < candidates; i++) {
-      all.add(new Candidate(i == 0 ? List.of() : List.of("a" + i), setup("sat", 10)));
+      all.add(new Candidate(Variant.of(i == 0 ? List.of() : List.of("a" + i)), setup("sat", 10)));
     }
     List<Instance> data = new ArrayList<>();
     for (int i = 0; i < instances; i++) {
@@ -159,7 +166,13 @@ final class Samples {
     }
     Candidate inService = all.get(random.nextInt(candidates));
     return new Contest(
-        family, digest(family), all, inService, List.copyOf(pairs), data, random.nextInt(3));
+        family,
+        new TreeMap<>(Map.of("", digest(family))),
+        all,
+        inService,
+        List.copyOf(pairs),
+        data,
+        random.nextInt(3));
   }
 
   static Sweep sweep(String name, List<Contest> contests, int seeds, int blockSize) {

@@ -31,7 +31,7 @@ class SweepFileTests {
   }
 
   private static List<String> variants(Sweep sweep) {
-    return sweep.contests().get(0).candidates().stream().map(Candidate::variant).toList();
+    return sweep.contests().get(0).candidates().stream().map(c -> c.variant().name()).toList();
   }
 
   private static List<String> instances(Sweep sweep) {
@@ -53,7 +53,7 @@ class SweepFileTests {
     Contest contest = sweep.contests().get(0);
     assertThat(sweep.name()).isEqualTo("kiln-plan-spring");
     assertThat(sweep.notes()).startsWith("The load bound").contains("\nDoes that hold");
-    assertThat(contest.candidates().stream().map(Candidate::variant).distinct())
+    assertThat(contest.candidates().stream().map(c -> c.variant().name()).distinct())
         .containsExactly(
             "plain",
             "plain+load-bound",

@@ -169,8 +169,8 @@ class SweepMistakesTests {
     assertThat(withMore("sede: 3"))
         .containsExactly(
             "sweep.yaml:5:1: unknown key 'sede' (did you mean 'seeds'?)",
-            "  known: name, notes, families, backends, seeds, limits, tie-margin, penalty, cores,"
-                + " block-size, family, variants and 3 more");
+            "  known: name, notes, family-jars, families, backends, seeds, limits, tie-margin, penalty,"
+                + " cores, block-size, family and 4 more");
     assertThat(withMore("limits:", "  wall: 3 s", "  memmory: 1 GB"))
         .containsExactly(
             "sweep.yaml:7:3: limits: unknown key 'memmory' (did you mean 'memory'?)",
