@@ -27,6 +27,7 @@ import steelyard.results.ledger.LedgerProblem;
       SolveCommand.class,
       ListCommand.class,
       LowerCommand.class,
+      CompareCommand.class,
       ShowCommand.class,
       RerunCommand.class,
       AutoComplete.GenerateCompletion.class,

@@ -63,15 +63,6 @@ final class SweepCommand implements Callable<Integer> {
       Sweep sweep = SweepFile.read(file, desk.catalogue());
       sweep.remarks().forEach(remark -> err.println(Columns.visible(remark)));
       Plan plan = Plan.of(sweep);
-      Plan.Summary size = plan.summary();
-      err.println(
-          String.format(
-              Locale.ROOT,
-              "%s, %s, %s; %s at worst",
-              Phrases.count(size.candidates(), "candidate"),
-              Phrases.count(size.instances(), "instance"),
-              Phrases.count(size.runs(), "run"),
-              Columns.duration(size.hoursAtWorst() * 3600)));
       Holder holder =
           new Holder(
               ProcessHandle.current().pid(), "sweep " + sweep.name(), desk.clock().instant());
@@ -95,19 +86,15 @@ final class SweepCommand implements Callable<Integer> {
     Session session = desk.session(machine);
     ledger.sessions().add(session);
     CoreLeases leases = desk.leases(machine);
+    int atATime = Math.min(leases.slots(), plan.sweep().cores());
+    err.println(size(plan, atATime));
     Crew crew = desk.crew();
     ModelFactsFinder finder =
         new ModelFactsFinder(crew, ModelFactsFinder.in(ledger.models()), plan.sweep().build());
     steelyard.results.ledger.Sweep sweep;
     try (Telling telling = Telling.on(err, quiet)) {
       KeyedPlan keyed =
-          KeyedPlan.of(
-              plan,
-              desk.catalogue(),
-              finder,
-              session,
-              Math.min(leases.slots(), plan.sweep().cores()),
-              telling::models);
+          KeyedPlan.of(plan, desk.catalogue(), finder, session, atATime, telling::models);
       keyed.failures().forEach((what, why) -> telling.line(what + ": " + why));
       sweep =
           new SweepRun(crew, ledger, session, leases, desk.clock(), telling)
@@ -125,6 +112,22 @@ final class SweepCommand implements Callable<Integer> {
     out.println("\nThe page: " + page);
     OptionalInt signal = desk.signalStatus();
     return signal.orElse(facts.trust().isSound() ? ExitStatus.OK : ExitStatus.FINDING);
+  }
+
+  private static String size(Plan plan, int atATime) {
+    Plan.Summary size = plan.summary();
+    String asked =
+        atATime < plan.sweep().cores()
+            ? "; " + plan.sweep().cores() + " cores asked for, physical cores to be had: " + atATime
+            : "";
+    return String.format(
+        Locale.ROOT,
+        "%s, %s, %s; %s at worst%s",
+        Phrases.count(size.candidates(), "candidate"),
+        Phrases.count(size.instances(), "instance"),
+        Phrases.count(size.runs(), "run"),
+        Columns.duration(size.coreHoursAtWorst() * 3600 / atATime),
+        asked);
   }
 
   private String text() {

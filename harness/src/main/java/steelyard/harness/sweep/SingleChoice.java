@@ -47,12 +47,7 @@ public final class SingleChoice {
    * @throws SweepProblem if it is neither
    */
   public static Instance instance(Catalogue.Family family, String text) {
-    Mistakes mistakes = new Mistakes();
-    List<ListedInstance> shipped =
-        family
-            .instances()
-            .map(folder -> InstanceFolder.read(folder, folder.toString(), mistakes))
-            .orElse(List.of());
+    List<ListedInstance> shipped = shipped(family);
     Optional<ListedInstance> named =
         shipped.stream().filter(each -> each.name().equals(text)).findFirst();
     if (named.isPresent()) {
@@ -70,13 +65,31 @@ public final class SingleChoice {
             "  " + Phrases.known(names)));
   }
 
+  /**
+   * The name of the one family that ships an instance of that name.
+   *
+   * @throws SweepProblem if none does or several do
+   */
+  public static String shipping(Catalogue catalogue, String instance) {
+    List<String> families =
+        catalogue.families().stream()
+            .filter(family -> shipped(family).stream().anyMatch(i -> i.name().equals(instance)))
+            .map(Catalogue.Family::name)
+            .distinct()
+            .toList();
+    if (families.size() == 1) {
+      return families.get(0);
+    }
+    String ship = families.isEmpty() ? "no family ships" : String.join(" and ", families) + " ship";
+    throw new SweepProblem(
+        List.of(
+            ship + " an instance " + Phrases.quoted(instance),
+            "  name the family: --family " + (families.isEmpty() ? "NAME" : families.get(0))));
+  }
+
   /** The instances that a family ships, a line each: name, class, sets, best known objective. */
   public static List<String> listed(Catalogue.Family family) {
-    return family
-        .instances()
-        .map(folder -> InstanceFolder.read(folder, folder.toString(), new Mistakes()))
-        .orElse(List.of())
-        .stream()
+    return shipped(family).stream()
         .map(
             it ->
                 "%s  %s  %s  %s"
@@ -87,6 +100,13 @@ public final class SingleChoice {
                         it.known().isPresent() ? "best known " + it.known().getAsLong() : ""))
         .map(String::stripTrailing)
         .toList();
+  }
+
+  private static List<ListedInstance> shipped(Catalogue.Family family) {
+    return family
+        .instances()
+        .map(folder -> InstanceFolder.read(folder, folder.toString(), new Mistakes()))
+        .orElse(List.of());
   }
 
   private static Instance read(ListedInstance listed) {

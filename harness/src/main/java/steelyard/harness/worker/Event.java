@@ -51,6 +51,14 @@ public sealed interface Event {
   }
 
   /**
+   * One statement of a model.
+   *
+   * @param group the group that it belongs to
+   * @param text for people
+   */
+  record Stated(String group, String text) implements Event {}
+
+  /**
    * How large the lowering is.
    *
    * @param byGroup amounts of {@code unit} by group

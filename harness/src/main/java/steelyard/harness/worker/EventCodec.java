@@ -80,6 +80,9 @@ final class EventCodec {
     } else if (event instanceof Event.Missing missing) {
       kind(json, "missing").writeStringField("name", missing.name());
       json.writeStringField("reason", missing.reason());
+    } else if (event instanceof Event.Stated stated) {
+      kind(json, "stated").writeStringField("group", stated.group());
+      json.writeStringField("text", stated.text());
     } else {
       kind(json, "calibrated").writeNumberField("nanos", ((Event.Calibrated) event).nanos());
     }
@@ -220,6 +223,7 @@ final class EventCodec {
       case "family" -> readFamily(fields);
       case "backend" -> readBackend(fields);
       case "missing" -> new Event.Missing(fields.text("name"), fields.text("reason"));
+      case "stated" -> new Event.Stated(fields.text("group"), fields.text("text"));
       case "calibrated" -> new Event.Calibrated(fields.number("nanos"));
       default -> throw new IOException("unknown kind of event '" + kind + "'");
     };

@@ -17,6 +17,7 @@ import steelyard.variants.family.Family;
  *   <li>{@code run}: solves the {@code order.json}
  *   <li>{@code lower FORMAT FILE}: lowers it; FORMAT may be empty
  *   <li>{@code digest FILE}: builds each subject in the file and says its digests
+ *   <li>{@code state FILE}: says what the models of the subjects in the file state
  *   <li>{@code judge}: judges the run in each folder that is named on standard input
  *   <li>{@code describe}: says which families and backends there are
  *   <li>{@code calibrate}: times the calibration task
@@ -68,6 +69,7 @@ public final class Worker {
           new Run(Wire.readOrder(Path.of(Wire.ORDER)), events, lifeline)
               .print(args.get(1), Path.of(args.get(2)));
       case "digest" -> digest(Path.of(args.get(1)), events);
+      case "state" -> state(Path.of(args.get(1)), events);
       case "judge" -> judge(lifeline);
       case "describe" -> describe(events);
       case TRAIN -> describe(events);
@@ -85,6 +87,13 @@ public final class Worker {
       events.phase(Phases.build(i));
       events.write(
           new Event.Built(Built.facts(Built.read(subject).model(subject.amendments()), i)));
+    }
+  }
+
+  private static void state(Path file, EventWriter events) throws IOException {
+    for (Subject subject : Wire.readSubjects(file)) {
+      Subject.OfVariant variant = (Subject.OfVariant) subject;
+      Statements.of(Built.read(variant).model(variant.amendments()), events::write);
     }
   }
 

@@ -234,8 +234,30 @@ class CommandTest {
   }
 
   @Test
+  void compares_two_variants_group_by_group() {
+    Result result =
+        run(
+            "compare",
+            "plain",
+            "plain+lightest-count",
+            CARTS.resolve("even").toString(),
+            "--family",
+            "faulty-cart");
+    assertThat(result.status()).as(result.err()).isEqualTo(ExitStatus.OK);
+    assertThat(result.out())
+        .contains("lightest-count/no more lots than fit: added")
+        .containsPattern("0 +1  lightest-count/no more")
+        .containsPattern("loaded\\[0\\] \\+ loaded\\[1\\]")
+        .contains("(objective): the same")
+        .doesNotContain("withdrawn");
+    assertThat(run("compare", "plain", "plain", "nowhere").err())
+        .contains("no family ships an instance 'nowhere'");
+  }
+
+  @Test
   void help_of_every_command_has_examples_and_fits_80_columns() {
-    for (String command : List.of("sweep", "brief", "list", "lower", "show", "rerun", "solve")) {
+    for (String command :
+        List.of("sweep", "brief", "list", "lower", "compare", "show", "rerun", "solve")) {
       Result result = run(command, "--help");
       assertThat(result.status()).isEqualTo(ExitStatus.OK);
       assertThat(result.out()).as(command).contains("Examples:", "steelyard " + command);

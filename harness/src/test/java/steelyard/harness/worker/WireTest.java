@@ -87,6 +87,7 @@ class WireTest {
                     Setting.choice("factory", List.of("one", "two"), "which")),
                 0.85)),
         new Event.Missing("choco", NASTY),
+        new Event.Stated("group " + NASTY, NASTY),
         new Event.Calibrated(123));
   }
 
