@@ -3,15 +3,10 @@ package steelyard.variants.family;
 import static java.util.Comparator.comparingInt;
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.IOException;
-import java.io.UncheckedIOException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.OptionalLong;
-import java.util.ServiceLoader;
 import java.util.Set;
 import java.util.SplittableRandom;
 import java.util.TreeMap;
@@ -28,11 +23,12 @@ import steelyard.variants.model.judge.Evaluator.Judgement;
 
 /** What every family owes, on each family that is found and its smallest instances. */
 class FamilyContractTest {
-  private static final Path SHARE = Path.of("src/main/share/instances");
   private static final String WELL_FORMED = "[a-z][a-z0-9]*(-[a-z0-9]+)*";
 
-  /** How many amendments are combined in every way. */
-  private static final int TOGETHER = 3;
+  /** How many amendments are combined in every way: fewer of a family that has many. */
+  private static int together(Family<?> family) {
+    return family.amendments().size() > 15 ? 2 : 3;
+  }
 
   /** A family with one of its instances. */
   private record Case<I>(Family<I> family, String name, I instance) {
@@ -51,11 +47,7 @@ class FamilyContractTest {
   }
 
   static Stream<Family<?>> families() {
-    List<Family<?>> found = new ArrayList<>();
-    for (Family<?> family : ServiceLoader.load(Family.class)) {
-      found.add(family);
-    }
-    return found.stream();
+    return GivenFamilies.all();
   }
 
   static Stream<Case<?>> cases() {
@@ -69,20 +61,10 @@ class FamilyContractTest {
 
   /** The family's instances of the set {@code tiny}. */
   private static <I> Stream<Case<?>> tiny(Family<I> family) {
-    Path folder = SHARE.resolve(family.name());
-    try {
-      List<Case<?>> cases = new ArrayList<>();
-      for (String row : Files.readAllLines(folder.resolve("instances.csv"))) {
-        List<String> cells = List.of(row.split(",", -1));
-        if (List.of(cells.get(1).split(";", -1)).contains("tiny")) {
-          InstanceSource source = new InstanceSource(cells.get(0), folder.resolve(cells.get(0)));
-          cases.add(new Case<>(family, source.name(), family.read(source)));
-        }
-      }
-      return cases.stream();
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
+    return GivenFamilies.instances(family).stream()
+        .filter(listed -> listed.sets().contains("tiny"))
+        .map(
+            listed -> new Case<>(family, listed.path(), GivenFamilies.read(family, listed.path())));
   }
 
   @Test
@@ -113,7 +95,7 @@ class FamilyContractTest {
   }
 
   @ParameterizedTest
-  @MethodSource("cases")
+  @MethodSource("smallestCases")
   <I> void variants_build_alike_twice_and_keep_the_decisions_of_plain(Case<I> of) {
     Model plain = of.build(Variant.PLAIN);
     for (Variant variant : variants(of.family)) {
@@ -130,7 +112,7 @@ class FamilyContractTest {
   /** Every choice of up to so many amendments that can stand together, with what they require. */
   private static <I> Set<Variant> variants(Family<I> family) {
     Set<Set<String>> chosen = new LinkedHashSet<>(Set.of(Set.of()));
-    for (int size = 0; size < TOGETHER; size++) {
+    for (int size = 0; size < together(family); size++) {
       for (Set<String> smaller : List.copyOf(chosen)) {
         for (Amendment<I> amendment : family.amendments()) {
           Set<String> larger = new LinkedHashSet<>(smaller);
