@@ -1,0 +1,4 @@
+package steelyard.variants.catalog.glazing;
+
+/** Slots in a row, {@code end} excluded. */
+record Window(int start, int end) {}
