@@ -13,7 +13,6 @@ import org.junit.jupiter.params.provider.FieldSource;
 import steelyard.adapters.cpsat.Solving.Solved;
 import steelyard.adapters.spi.AllAssignments;
 import steelyard.adapters.spi.Goal;
-import steelyard.adapters.spi.RandomRelations;
 import steelyard.adapters.spi.SolveOutcome.Why;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.Comparison;
@@ -31,13 +30,14 @@ import steelyard.variants.model.Relation;
 import steelyard.variants.model.Task;
 import steelyard.variants.model.View;
 import steelyard.variants.model.judge.RelationJudge;
+import steelyard.variants.model.sample.RandomRelations;
 
 /** Every kind in every form against the judge, on every assignment of small domains. */
 class AgreementTest {
   private static final int SEEDS = Integer.getInteger("steelyard.agreement.seeds", 15);
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void findsExactlyTheSolutions_whenPosted(String kind) {
     for (int seed = 0; seed < 3 * SEEDS; seed++) {
       RandomRelations made = new RandomRelations(seed, 3);
@@ -47,7 +47,7 @@ class AgreementTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void findsExactlyTheSolutions_whenConditional(String kind) {
     for (int seed = 0; seed < SEEDS; seed++) {
       RandomRelations made = new RandomRelations(5_000 + seed, 3);
@@ -62,7 +62,7 @@ class AgreementTest {
 
   /** Presolve joins constraints: three at a time, one of them often an equation. */
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void findsExactlyTheSolutions_whenKindsMeet(String kind) {
     List<String> kinds = RandomRelations.KINDS;
     for (int seed = 0; seed < 3 * SEEDS; seed++) {

@@ -17,7 +17,6 @@ import org.junit.jupiter.params.provider.EnumSource;
 import steelyard.adapters.cpsat.Solving.Solved;
 import steelyard.adapters.spi.AllAssignments;
 import steelyard.adapters.spi.Goal;
-import steelyard.adapters.spi.RandomRelations;
 import steelyard.adapters.spi.SolveOutcome.Why;
 import steelyard.adapters.spi.SolveRequest;
 import steelyard.adapters.spi.Status;
@@ -35,6 +34,7 @@ import steelyard.variants.model.Objective.Sense;
 import steelyard.variants.model.Relation;
 import steelyard.variants.model.judge.Evaluator;
 import steelyard.variants.model.judge.RelationJudge;
+import steelyard.variants.model.sample.RandomRelations;
 
 /** Optima, and the bounds on the way to them, are exact integers. */
 class OptimiseTest {

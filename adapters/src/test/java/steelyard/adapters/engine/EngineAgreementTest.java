@@ -19,7 +19,6 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.FieldSource;
 import steelyard.adapters.spi.AllAssignments;
 import steelyard.adapters.spi.Goal;
-import steelyard.adapters.spi.RandomRelations;
 import steelyard.adapters.spi.SmallModels;
 import steelyard.adapters.spi.SolveOutcome;
 import steelyard.adapters.spi.Status;
@@ -40,6 +39,7 @@ import steelyard.variants.model.Relation;
 import steelyard.variants.model.Task;
 import steelyard.variants.model.View;
 import steelyard.variants.model.judge.RelationJudge;
+import steelyard.variants.model.sample.RandomRelations;
 
 /** Every kind in every form against the judge, on every assignment of small domains. */
 class EngineAgreementTest {
@@ -50,7 +50,7 @@ class EngineAgreementTest {
   private static final int KINDS = RandomRelations.KINDS.size();
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void findsExactlyTheSolutions_whenPosted(String kind) {
     for (int seed = 0; seed < 150; seed++) {
       RandomRelations made = new RandomRelations(seed, 4);
@@ -60,7 +60,7 @@ class EngineAgreementTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void findsExactlyTheSolutions_whenConditional(String kind) {
     for (int seed = 0; seed < 50; seed++) {
       RandomRelations made = new RandomRelations(1_000 + seed, 3);
@@ -75,7 +75,7 @@ class EngineAgreementTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void findsExactlyTheSolutions_whenKindsMeet(String kind) {
     List<String> kinds = RandomRelations.KINDS;
     for (int seed = 0; seed < 60; seed++) {

@@ -15,7 +15,6 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.FieldSource;
 import steelyard.adapters.spi.AllAssignments;
 import steelyard.adapters.spi.Goal;
-import steelyard.adapters.spi.RandomRelations;
 import steelyard.adapters.spi.SmallModels;
 import steelyard.adapters.spi.SolveOutcome;
 import steelyard.adapters.spi.Status;
@@ -30,6 +29,7 @@ import steelyard.variants.model.Model;
 import steelyard.variants.model.Objective;
 import steelyard.variants.model.Relation;
 import steelyard.variants.model.judge.RelationJudge;
+import steelyard.variants.model.sample.RandomRelations;
 
 /** Solutions and optima of random small models against the judge, on every assignment. */
 class SatAgreementTest {
@@ -39,7 +39,7 @@ class SatAgreementTest {
   private static final int KINDS = RandomRelations.KINDS.size();
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void enumeratesExactlyTheSolutions_ofPostedRelations(String kind) {
     LongStream.range(0, 80)
         .forEach(
@@ -52,7 +52,7 @@ class SatAgreementTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void enumeratesExactlyTheSolutions_ofConditionals(String kind) {
     LongStream.range(0, 25)
         .forEach(

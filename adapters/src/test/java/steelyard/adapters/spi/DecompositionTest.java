@@ -38,11 +38,12 @@ import steelyard.variants.model.View;
 import steelyard.variants.model.Views;
 import steelyard.variants.model.judge.FlatJudge;
 import steelyard.variants.model.judge.RelationJudge;
+import steelyard.variants.model.sample.RandomRelations;
 
 /** Each truth and reduction against the judge, on every assignment of small domains. */
 class DecompositionTest {
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void truthHoldsExactlyWhereTheRelationDoes(String kind) {
     LongStream.range(0, 80)
         .forEach(
@@ -57,7 +58,7 @@ class DecompositionTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void reductionHoldsExactlyWhereTheConditionalDoes(String kind) {
     LongStream.range(0, 30)
         .forEach(
@@ -73,7 +74,7 @@ class DecompositionTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void definesInFiveShapesOnly(String kind) {
     for (long seed = 0; seed < 100; seed++) {
       RandomRelations made = new RandomRelations(seed, 4);

@@ -19,6 +19,7 @@ import steelyard.variants.model.Model;
 import steelyard.variants.model.Relation;
 import steelyard.variants.model.Rewriting;
 import steelyard.variants.model.judge.RelationJudge;
+import steelyard.variants.model.sample.RandomRelations;
 
 /** What a relation says does not depend on names of variables and on the order of what commutes. */
 class RewritingTest {
@@ -43,7 +44,7 @@ class RewritingTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void keepsTheMeaning_whenShuffled(String kind) {
     for (long seed = 0; seed < 30; seed++) {
       RandomRelations made = new RandomRelations(seed, VARIABLES);
@@ -64,7 +65,7 @@ class RewritingTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void keepsTheCanonicalDigest_whenShuffled(String kind) {
     for (long seed = 0; seed < 30; seed++) {
       RandomRelations made = new RandomRelations(seed, VARIABLES);
@@ -76,7 +77,7 @@ class RewritingTest {
 
   /** A digest that left a part of the relation out would be equal where meanings differ. */
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void hasAnotherDigest_whereTheMeaningDiffers(String kind) {
     List<Domain> domains = new RandomRelations(1, VARIABLES).domains();
     List<Model> models = new ArrayList<>();
@@ -96,7 +97,7 @@ class RewritingTest {
   }
 
   @ParameterizedTest
-  @FieldSource("steelyard.adapters.spi.RandomRelations#KINDS")
+  @FieldSource("steelyard.variants.model.sample.RandomRelations#KINDS")
   void mentionsEveryVariableThatMatters(String kind) {
     for (long seed = 0; seed < 30; seed++) {
       RandomRelations made = new RandomRelations(seed, VARIABLES);

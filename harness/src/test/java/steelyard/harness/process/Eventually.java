@@ -6,11 +6,11 @@ import java.util.function.BooleanSupplier;
 
 /** Waits for what another process brings about. */
 public final class Eventually {
-  private static final long DEADLINE_NANOS = TimeUnit.SECONDS.toNanos(30);
+  private static final long DEADLINE_NANOS = TimeUnit.SECONDS.toNanos(120);
 
   private Eventually() {}
 
-  /** Looks again and again until the condition holds; false once thirty seconds have passed. */
+  /** Looks again and again until the condition holds; false once two minutes have passed. */
   public static boolean holds(BooleanSupplier condition) {
     long from = System.nanoTime();
     while (!condition.getAsBoolean()) {

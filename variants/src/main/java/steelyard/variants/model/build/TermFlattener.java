@@ -208,8 +208,8 @@ final class TermFlattener {
   }
 
   private View ofSum(LinearSum sum, Range range, Term term) {
-    if (sum.size() == 0) {
-      return View.constant(range.domain(term).min());
+    if (sum.size() == 0 && Math.abs(sum.constant()) <= Domain.LIMIT) {
+      return View.constant((int) sum.constant()); // its terms may have cancelled each other
     }
     boolean isView = sum.size() == 1 && Math.abs(sum.coefficient(0)) == 1;
     if (isView && Math.abs(sum.constant()) <= Domain.LIMIT) {

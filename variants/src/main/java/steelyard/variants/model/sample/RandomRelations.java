@@ -1,14 +1,10 @@
-package steelyard.adapters.spi;
+package steelyard.variants.model.sample;
 
 import java.util.ArrayList;
-import java.util.Arrays;
-import java.util.Collections;
 import java.util.List;
+import java.util.SplittableRandom;
 import java.util.function.Supplier;
 import java.util.stream.IntStream;
-import org.apache.commons.rng.UniformRandomProvider;
-import org.apache.commons.rng.core.source64.SplitMix64;
-import org.apache.commons.rng.sampling.ArraySampler;
 import steelyard.variants.model.Absolute;
 import steelyard.variants.model.AllDifferent;
 import steelyard.variants.model.AllDifferentExcept;
@@ -83,13 +79,24 @@ public final class RandomRelations {
           "knapsack",
           "precedence");
 
-  private final UniformRandomProvider random;
+  private final SplittableRandom random;
   private final List<Domain> domains;
 
   /** Relations over {@code variables} new random domains. */
   public RandomRelations(long seed, int variables) {
-    this.random = new SplitMix64(seed);
-    this.domains = Collections.unmodifiableList(some(variables, this::domain));
+    this.random = new SplittableRandom(seed);
+    this.domains = List.copyOf(some(variables, this::domain));
+  }
+
+  /** Relations over variables of the given domains, drawn from a generator that others share. */
+  RandomRelations(SplittableRandom random, List<Domain> domains) {
+    this.random = random;
+    this.domains = List.copyOf(domains);
+  }
+
+  /** A domain as those of variables are drawn. */
+  static Domain domain(SplittableRandom random) {
+    return new RandomRelations(random, List.of()).domain();
   }
 
   public List<Domain> domains() {
@@ -165,9 +172,10 @@ public final class RandomRelations {
 
   /** Some of the values -1..3, in any order. */
   private Ints values(int most) {
-    int[] values = IntStream.rangeClosed(-1, 3).toArray();
-    ArraySampler.shuffle(random, values);
-    return Ints.of(Arrays.copyOf(values, random.nextInt(most + 1)));
+    List<Integer> left = new ArrayList<>(List.of(-1, 0, 1, 2, 3));
+    int size = random.nextInt(most + 1);
+    return Ints.of(
+        IntStream.range(0, size).map(i -> left.remove(random.nextInt(left.size()))).toArray());
   }
 
   private Automaton automaton() {
