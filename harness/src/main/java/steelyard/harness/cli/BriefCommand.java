@@ -1,8 +1,9 @@
 package steelyard.harness.cli;
 
 import java.io.PrintWriter;
-import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
+import java.util.SortedMap;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -14,7 +15,6 @@ import steelyard.harness.launch.HarnessProblem;
 import steelyard.harness.sweep.text.Phrases;
 import steelyard.results.brief.Facts;
 import steelyard.results.brief.page.JsonPage;
-import steelyard.results.brief.page.TextPage;
 import steelyard.results.ledger.Ledger;
 import steelyard.results.ledger.Sweep;
 import steelyard.results.ledger.SweepSummary;
@@ -47,15 +47,23 @@ final class BriefCommand implements Callable<Integer> {
     try (Ledger ledger = Ledger.read(shared.file())) {
       Sweep sweep = find(ledger);
       Briefs briefs = new Briefs(ledger, shared.folder());
-      Facts facts = briefs.facts(sweep);
+      SortedMap<String, Facts> facts = briefs.facts(sweep);
       PrintWriter out = spec.commandLine().getOut();
-      out.println((json ? JsonPage.json(facts) : TextPage.text(facts)).stripTrailing());
-      Path page = briefs.write(sweep, facts);
-      if (!json) {
-        out.println("\nThe page: " + page);
+      if (json) {
+        out.println(json(facts));
+        briefs.write(sweep, facts);
+      } else {
+        briefs.report(sweep, facts, out);
       }
-      return facts.trust().isSound() ? ExitStatus.OK : ExitStatus.FINDING;
+      return Briefs.isSound(facts) ? ExitStatus.OK : ExitStatus.FINDING;
     }
+  }
+
+  /** One object, or an array of one for each family. */
+  private static String json(SortedMap<String, Facts> all) {
+    List<String> texts =
+        all.values().stream().map(facts -> JsonPage.json(facts).stripTrailing()).toList();
+    return texts.size() == 1 ? texts.get(0) : "[" + String.join(",\n", texts) + "]";
   }
 
   private Sweep find(Ledger ledger) {

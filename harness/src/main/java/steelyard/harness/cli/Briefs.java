@@ -1,13 +1,18 @@
 package steelyard.harness.cli;
 
 import java.io.IOException;
+import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import steelyard.harness.launch.HarnessProblem;
@@ -18,6 +23,7 @@ import steelyard.results.brief.Facts;
 import steelyard.results.brief.Rules;
 import steelyard.results.brief.page.HtmlPage;
 import steelyard.results.brief.page.JsonPage;
+import steelyard.results.brief.page.TextPage;
 import steelyard.results.ledger.Block;
 import steelyard.results.ledger.Calibration;
 import steelyard.results.ledger.Cell;
@@ -59,19 +65,51 @@ final class Briefs {
     return folder.resolve("sweeps").resolve(sweep + ".json");
   }
 
-  /** The facts of a sweep as far as it has come. */
-  Facts facts(Sweep sweep) {
+  /** The facts of a sweep as far as it has come, by family. */
+  SortedMap<String, Facts> facts(Sweep sweep) {
+    Map<String, Integer> planned = plannedRuns(sweep);
+    BriefChoices choices = choices(sweep, planned.keySet());
     List<Observation> observations = ledger.observations(sweep.id());
-    return Brief.of(context(sweep, observations.size()), observations);
+    SortedMap<String, Facts> all = new TreeMap<>();
+    choices
+        .families()
+        .forEach(
+            (family, contested) -> {
+              List<Observation> own =
+                  observations.stream().filter(run -> run.family().equals(family)).toList();
+              String name =
+                  choices.families().size() == 1 ? sweep.name() : sweep.name() + ": " + family;
+              BriefContext.Plan plan =
+                  new BriefContext.Plan(
+                      name,
+                      contested.inService(),
+                      planned.getOrDefault(family, 0),
+                      own.size(),
+                      sweep.planned(),
+                      lastRun(sweep),
+                      sweep.file());
+              all.put(family, Brief.of(context(sweep, plan, choices, contested), own));
+            });
+    return all;
   }
 
-  private BriefContext context(Sweep sweep, int finished) {
-    SweepSummary summary =
-        ledger.plans().sweeps().stream()
-            .filter(each -> each.id().equals(sweep.id()))
-            .findFirst()
-            .orElseThrow();
-    BriefChoices choices = choices(sweep);
+  private SortedMap<String, Integer> plannedRuns(Sweep sweep) {
+    SortedMap<String, Integer> planned = new TreeMap<>();
+    for (Block block : ledger.plans().blocks(sweep.id())) {
+      block.cells().forEach(cell -> planned.merge(cell.recipe().family(), 1, Integer::sum));
+    }
+    return planned;
+  }
+
+  private Optional<Instant> lastRun(Sweep sweep) {
+    return ledger.plans().sweeps().stream()
+        .filter(each -> each.id().equals(sweep.id()))
+        .findFirst()
+        .flatMap(SweepSummary::lastRun);
+  }
+
+  private BriefContext context(
+      Sweep sweep, BriefContext.Plan plan, BriefChoices choices, BriefChoices.Contested contested) {
     Rules rules =
         new Rules(
             choices.tieMargin(),
@@ -79,29 +117,26 @@ final class Briefs {
             Rules.STANDARD.shiftSeconds(),
             Rules.STANDARD.floorSeconds());
     return new BriefContext(
-        new BriefContext.Plan(
-            sweep.name(),
-            sweep.inService().orElse("none"),
-            Math.toIntExact(summary.cells()),
-            finished,
-            sweep.planned(),
-            summary.lastRun(),
-            sweep.file()),
+        plan,
         site(sweep),
         rules,
-        choices.pairs().stream()
+        contested.pairs().stream()
             .map(pair -> new BriefContext.Asked(pair.before(), pair.after()))
             .toList(),
         List.of(),
         "steelyard rerun " + BriefContext.RUN);
   }
 
-  private BriefChoices choices(Sweep sweep) {
+  /** As the sweep file said; where that is lost, the standard. */
+  private BriefChoices choices(Sweep sweep, Set<String> families) {
     Path file = choicesFile(folder, sweep.id());
     try {
       return BriefChoices.ofJson(Files.readString(file), file.toString());
     } catch (IOException e) {
-      return new BriefChoices(List.of(), Rules.STANDARD.margin(), Rules.STANDARD.penaltyFactor());
+      SortedMap<String, BriefChoices.Contested> standard = new TreeMap<>();
+      String inService = sweep.inService().orElse("none");
+      families.forEach(f -> standard.put(f, new BriefChoices.Contested(inService, List.of())));
+      return new BriefChoices(standard, Rules.STANDARD.margin(), Rules.STANDARD.penaltyFactor());
     }
   }
 
@@ -146,17 +181,42 @@ final class Briefs {
         nanos.size());
   }
 
-  /** Writes page and JSON into the ledger's folder; where the page lies. */
-  Path write(Sweep sweep, Facts facts) {
+  /**
+   * Writes pages and JSON into the ledger's folder.
+   *
+   * @param all by family
+   * @return where the pages lie
+   */
+  List<Path> write(Sweep sweep, SortedMap<String, Facts> all) {
     Path into = folder.resolve("briefs").resolve(sweep.name());
     try {
       Files.createDirectories(into);
-      Path page = into.resolve("brief.html");
-      HtmlPage.write(facts, page);
-      JsonPage.write(facts, into.resolve("brief.json"));
-      return page;
+      List<Path> pages = new ArrayList<>();
+      for (Map.Entry<String, Facts> facts : all.entrySet()) {
+        String name = all.size() == 1 ? "brief" : "brief-" + facts.getKey();
+        Path page = into.resolve(name + ".html");
+        HtmlPage.write(facts.getValue(), page);
+        JsonPage.write(facts.getValue(), into.resolve(name + ".json"));
+        pages.add(page);
+      }
+      return pages;
     } catch (IOException e) {
       throw HarnessProblem.of("cannot write the brief to " + into, e);
     }
+  }
+
+  /** Prints the facts, then writes the pages and says where they lie. */
+  void report(Sweep sweep, SortedMap<String, Facts> all, PrintWriter out) {
+    all.values().forEach(facts -> out.println(TextPage.text(facts).stripTrailing() + "\n"));
+    List<Path> pages = write(sweep, all);
+    out.println(pages.size() == 1 ? "The page: " + pages.get(0) : "The pages:");
+    if (pages.size() > 1) {
+      pages.forEach(page -> out.println("  " + page));
+    }
+  }
+
+  /** Whether no answer of any family is wrong. */
+  static boolean isSound(SortedMap<String, Facts> all) {
+    return all.values().stream().allMatch(facts -> facts.trust().isSound());
   }
 }

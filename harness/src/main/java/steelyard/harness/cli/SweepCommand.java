@@ -6,6 +6,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Locale;
 import java.util.OptionalInt;
+import java.util.SortedMap;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -27,7 +28,6 @@ import steelyard.harness.sweep.Sweep;
 import steelyard.harness.sweep.SweepFile;
 import steelyard.harness.sweep.text.Phrases;
 import steelyard.results.brief.Facts;
-import steelyard.results.brief.page.TextPage;
 import steelyard.results.ledger.Holder;
 import steelyard.results.ledger.Ledger;
 import steelyard.results.ledger.Session;
@@ -106,12 +106,10 @@ final class SweepCommand implements Callable<Integer> {
                   begun -> Briefs.keep(BriefChoices.of(plan.sweep()), begun.id(), shared.folder()));
     }
     Briefs briefs = new Briefs(ledger, shared.folder());
-    Facts facts = briefs.facts(sweep);
-    out.println(TextPage.text(facts).stripTrailing());
-    Path page = briefs.write(sweep, facts);
-    out.println("\nThe page: " + page);
+    SortedMap<String, Facts> facts = briefs.facts(sweep);
+    briefs.report(sweep, facts, out);
     OptionalInt signal = desk.signalStatus();
-    return signal.orElse(facts.trust().isSound() ? ExitStatus.OK : ExitStatus.FINDING);
+    return signal.orElse(Briefs.isSound(facts) ? ExitStatus.OK : ExitStatus.FINDING);
   }
 
   private static String size(Plan plan, int atATime) {

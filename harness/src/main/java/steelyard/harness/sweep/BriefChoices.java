@@ -1,7 +1,10 @@
 package steelyard.harness.sweep;
 
+import java.util.Collections;
 import java.util.List;
 import java.util.Objects;
+import java.util.SortedMap;
+import java.util.TreeMap;
 import steelyard.harness.sweep.text.SweepProblem;
 import steelyard.results.statistics.TieMargin;
 
@@ -9,11 +12,25 @@ import steelyard.results.statistics.TieMargin;
  * What a sweep file says of how its runs are to be reported; kept beside the ledger, because the
  * file and the instances that it names may be gone when the brief is made.
  *
- * @param pairs what is to be shown before against after, by candidates' names
+ * @param families by name of the family; a brief each
  * @param tieMargin within what distance two times are the same
  * @param penalty what a run without an answer counts as, in limits
  */
-public record BriefChoices(List<Names> pairs, TieMargin tieMargin, double penalty) {
+public record BriefChoices(
+    SortedMap<String, Contested> families, TieMargin tieMargin, double penalty) {
+
+  /**
+   * What one family's brief is about.
+   *
+   * @param inService the candidate that the others are held against
+   * @param pairs what is to be shown before against after, by candidates' names
+   */
+  public record Contested(String inService, List<Names> pairs) {
+    public Contested {
+      Objects.requireNonNull(inService, "inService");
+      pairs = List.copyOf(pairs);
+    }
+  }
 
   /** A pair by name. */
   public record Names(String before, String after) {
@@ -24,19 +41,21 @@ public record BriefChoices(List<Names> pairs, TieMargin tieMargin, double penalt
   }
 
   public BriefChoices {
-    pairs = List.copyOf(pairs);
+    families = Collections.unmodifiableSortedMap(new TreeMap<>(families));
     Objects.requireNonNull(tieMargin, "tieMargin");
   }
 
   public static BriefChoices of(Sweep sweep) {
-    return new BriefChoices(
-        sweep.contests().stream()
-            .flatMap(contest -> contest.pairs().stream())
-            .map(pair -> new Names(pair.before().name(), pair.after().name()))
-            .distinct()
-            .toList(),
-        sweep.tieMargin(),
-        sweep.penalty());
+    SortedMap<String, Contested> families = new TreeMap<>();
+    for (Contest contest : sweep.contests()) {
+      List<Names> pairs =
+          contest.pairs().stream()
+              .map(pair -> new Names(pair.before().name(), pair.after().name()))
+              .distinct()
+              .toList();
+      families.put(contest.family(), new Contested(contest.inService().name(), pairs));
+    }
+    return new BriefChoices(families, sweep.tieMargin(), sweep.penalty());
   }
 
   public String toJson() {

@@ -47,11 +47,15 @@ class DemoSweepTests {
     Sweep sweep = SweepFile.read(DEMO, catalogue());
 
     assertThat(sweep.remarks()).isEmpty();
-    assertThat(sweep.contests()).extracting(Contest::family).containsExactly("workshop");
-    assertThat(sweep.contests().get(0).inService().name()).isEqualTo("plain on cpsat");
+    assertThat(sweep.contests())
+        .extracting(Contest::family)
+        .containsExactly("workshop", "kiln-campaigns", "glaze-line");
+    assertThat(sweep.contests())
+        .extracting(contest -> contest.inService().name())
+        .containsOnly("plain on cpsat");
     assertThat(Plan.of(sweep).blocks())
         .as("each candidate meets each")
-        .hasSameSizeAs(sweep.contests().get(0).instances());
+        .hasSize(sweep.contests().stream().mapToInt(c -> c.instances().size()).sum());
   }
 
   @Test
