@@ -1,6 +1,7 @@
 package steelyard.adapters;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import java.util.ArrayList;
 import java.util.List;
@@ -15,11 +16,14 @@ import steelyard.adapters.spi.Goal;
 import steelyard.adapters.spi.Lowered;
 import steelyard.adapters.spi.Lowering;
 import steelyard.adapters.spi.Monitor;
+import steelyard.adapters.spi.Programs;
 import steelyard.adapters.spi.Refusal;
 import steelyard.adapters.spi.Seeding;
+import steelyard.adapters.spi.Setting;
 import steelyard.adapters.spi.Settings;
 import steelyard.adapters.spi.SolveOutcome;
 import steelyard.adapters.spi.SolveRequest;
+import steelyard.adapters.spi.TestPrograms;
 import steelyard.adapters.spi.Work;
 import steelyard.variants.model.Longs;
 import steelyard.variants.model.Model;
@@ -41,12 +45,30 @@ record Told(SolveOutcome outcome, List<Judgement> solutions, List<Long> bounds) 
     bounds = List.copyOf(bounds);
   }
 
-  /** Asks the backend at its default settings, one thread, within the wall limit. */
+  /**
+   * Asks the backend at its default settings, one thread, within the wall limit. Of a backend that
+   * starts a program it is assumed that the program is there.
+   */
   static Told by(Backend backend, Model model, Goal goal, long seed, long seconds) {
-    Seeding seeding = Seeding.of(model, seed);
-    Settings settings = Settings.of(backend.describe(), Map.of());
-    Wall wall = new Wall(seconds);
-    SolveRequest request = new SolveRequest(settings, seed, 1, wall);
+    try (TestPrograms programs = TestPrograms.inTemporaryFolder()) {
+      Settings settings = Settings.of(backend.describe(), Map.of());
+      assumeUsable(backend, settings, programs);
+      Wall wall = new Wall(seconds);
+      SolveRequest request = new SolveRequest(settings, seed, 1, wall, programs);
+      return by(backend, model, goal, request, wall);
+    }
+  }
+
+  private static void assumeUsable(Backend backend, Settings settings, Programs programs) {
+    boolean startsProgram =
+        backend.describe().settings().stream().anyMatch(s -> s.kind() == Setting.Kind.COMMAND);
+    if (startsProgram && backend.probe(settings, programs) instanceof Refusal refusal) {
+      assumeTrue(false, refusal.reason());
+    }
+  }
+
+  private static Told by(Backend backend, Model model, Goal goal, SolveRequest request, Wall wall) {
+    Seeding seeding = Seeding.of(model, request.seed());
     Ear ear = new Ear(model);
     Monitor monitor = seeding.monitor(ear);
     Lowered lowered = backend.lower(seeding.model(), request, monitor);

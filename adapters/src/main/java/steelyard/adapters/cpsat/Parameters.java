@@ -48,7 +48,8 @@ final class Parameters {
               field.getJavaType() == FieldDescriptor.JavaType.INT
                   ? (Object) Math.toIntExact(given.integer(setting.name()))
                   : (Object) given.integer(setting.name());
-          case CHOICE -> throw new IllegalStateException(setting.name() + " is no parameter");
+          case CHOICE, COMMAND ->
+              throw new IllegalStateException(setting.name() + " is no parameter");
         };
     parameters.setField(field, value);
   }

@@ -1,8 +1,10 @@
 package steelyard.adapters.sat;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import steelyard.adapters.sat.encoding.EncodingSettings;
 import steelyard.adapters.spi.Backend;
 import steelyard.adapters.spi.Description;
 import steelyard.adapters.spi.Goal;
@@ -19,9 +21,6 @@ import steelyard.variants.model.Model;
  */
 public final class SatBackend implements Backend {
   static final String SOLVER = "solver";
-  static final String MOST_VARIABLES = "max-variables";
-  static final String MOST_CLAUSES = "max-clauses";
-  static final String MOST_EDGES = "diagram-edges";
   static final String CONFLICTS = "conflicts";
 
   /**
@@ -52,22 +51,15 @@ public final class SatBackend implements Backend {
         true,
         Set.of(Goal.Satisfy.class, Goal.Optimise.class, Goal.Enumerate.class),
         List.of(CONFLICTS),
-        List.of(
-            Setting.choice(SOLVER, SOLVERS, "configuration of the solver"),
-            Setting.integer(
-                MOST_VARIABLES,
-                10_000_000,
-                1,
-                1_000_000_000,
-                "refuse more propositional variables"),
-            Setting.integer(MOST_CLAUSES, 30_000_000, 1, 1_000_000_000_000L, "refuse more clauses"),
-            Setting.integer(
-                MOST_EDGES,
-                20_000,
-                0,
-                1_000_000_000,
-                "encode sums whose diagram would have more edges as binary numbers")),
+        settings(),
         0.85);
+  }
+
+  private static List<Setting> settings() {
+    List<Setting> settings = new ArrayList<>();
+    settings.add(Setting.choice(SOLVER, SOLVERS, "configuration of the solver"));
+    settings.addAll(EncodingSettings.declared());
+    return settings;
   }
 
   @Override

@@ -1,15 +1,12 @@
 package steelyard.adapters.sat;
 
-import java.io.IOException;
-import java.util.Collections;
 import java.util.Optional;
 import java.util.OptionalLong;
-import java.util.SortedSet;
-import java.util.TreeSet;
 import java.util.concurrent.atomic.AtomicBoolean;
 import steelyard.adapters.sat.encoding.ClauseSink;
-import steelyard.adapters.sat.encoding.DimacsText;
+import steelyard.adapters.sat.encoding.EncodingSettings;
 import steelyard.adapters.sat.encoding.EncodingStopped;
+import steelyard.adapters.sat.encoding.FormulaText;
 import steelyard.adapters.sat.encoding.Limits;
 import steelyard.adapters.sat.encoding.ModelEncoder;
 import steelyard.adapters.spi.Deadline;
@@ -20,7 +17,6 @@ import steelyard.adapters.spi.Lowering;
 import steelyard.adapters.spi.Monitor;
 import steelyard.adapters.spi.Printable;
 import steelyard.adapters.spi.Refusal;
-import steelyard.adapters.spi.Settings;
 import steelyard.adapters.spi.Sizes;
 import steelyard.adapters.spi.SolveOutcome;
 import steelyard.adapters.spi.SolveRequest;
@@ -54,14 +50,12 @@ final class SatLowering implements Lowering {
     if (work.isPresent() && !work.get().unit().equals(SatBackend.CONFLICTS)) {
       return new Refusal("sat counts work in conflicts, not in " + work.get().unit());
     }
-    Settings settings = request.settings();
-    long variables = settings.integer(SatBackend.MOST_VARIABLES);
-    long clauses = settings.integer(SatBackend.MOST_CLAUSES);
+    EncodingSettings settings = EncodingSettings.of(request.settings());
     Deadline deadline = request.deadline();
     monitor.phase("count");
-    Limits limits = new Limits(variables, clauses, deadline::stopAsked);
     ModelEncoder counted =
-        new ModelEncoder(model, settings.integer(SatBackend.MOST_EDGES), ClauseSink.NONE, limits);
+        new ModelEncoder(
+            model, settings.mostEdges(), ClauseSink.NONE, settings.limits(deadline::stopAsked));
     AtomicBoolean stop = new AtomicBoolean();
     try {
       counted.encode();
@@ -69,12 +63,9 @@ final class SatLowering implements Lowering {
       Loaded loaded = load(counted, request, stop);
       return new SatLowering(model, request, counted.sizes(), stop, Optional.of(loaded));
     } catch (EncodingStopped e) {
-      return switch (e.why()) {
-        case STOP -> new SatLowering(model, request, counted.sizes(), stop, Optional.empty());
-        case VARIABLES ->
-            new Refusal(tooMany(variables, "variables", SatBackend.MOST_VARIABLES, counted));
-        case CLAUSES -> new Refusal(tooMany(clauses, "clauses", SatBackend.MOST_CLAUSES, counted));
-      };
+      return e.why() == EncodingStopped.Why.STOP
+          ? new SatLowering(model, request, counted.sizes(), stop, Optional.empty())
+          : settings.tooLarge("sat", e.why(), counted);
     }
   }
 
@@ -89,12 +80,6 @@ final class SatLowering implements Lowering {
     encoder.encode();
     encoder.cnf().liftLimits();
     return new Loaded(encoder, solver);
-  }
-
-  private static String tooMany(long most, String what, String setting, ModelEncoder counted) {
-    String limit = "sat would need more than " + most + " " + what + " (" + setting + "): ";
-    String reached = counted.cnf().variables() + " variables, " + counted.cnf().clauses();
-    return limit + reached + " clauses up to " + counted.at();
   }
 
   @Override
@@ -126,7 +111,7 @@ final class SatLowering implements Lowering {
   @Override
   public <F extends Facet> Optional<F> facet(Class<F> kind) {
     return kind == Printable.class && loaded.isPresent()
-        ? Optional.of(kind.cast(new Dimacs(loaded.get().encoder())))
+        ? Optional.of(kind.cast(new FormulaText(model, loaded.get().encoder(), sizes)))
         : Optional.empty();
   }
 
@@ -134,28 +119,5 @@ final class SatLowering implements Lowering {
   public void close() {
     stop.set(true);
     loaded.ifPresent(l -> l.solver().close());
-  }
-
-  private final class Dimacs implements Printable {
-    private static final String FORMAT = "dimacs";
-
-    private final ModelEncoder encoder;
-
-    Dimacs(ModelEncoder encoder) {
-      this.encoder = encoder;
-    }
-
-    @Override
-    public SortedSet<String> formats() {
-      return Collections.unmodifiableSortedSet(new TreeSet<>(Collections.singleton(FORMAT)));
-    }
-
-    @Override
-    public void print(String format, Appendable to) throws IOException {
-      if (!format.equals(FORMAT)) {
-        throw new IllegalArgumentException("sat prints dimacs, not '" + format + "'");
-      }
-      DimacsText.write(model, encoder, sizes, to);
-    }
   }
 }

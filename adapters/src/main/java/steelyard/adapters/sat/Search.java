@@ -125,30 +125,14 @@ final class Search {
       if (answer == Answer.YES) {
         found++;
         report();
-        forbid(projection);
+        integers.forbid(projection, solver.truth());
       }
     }
     return outcome(found > 0, answer, OptionalLong.empty());
   }
 
-  private void forbid(Ints projection) {
-    int[] differs = new int[2 * projection.size()];
-    int size = 0;
-    for (int i = 0; i < projection.size(); i++) {
-      int variable = projection.get(i);
-      int position = integers.position(variable, solver.truth());
-      if (position > 0) {
-        differs[size++] = -integers.order(variable, position);
-      }
-      if (position + 1 < integers.size(variable)) {
-        differs[size++] = integers.order(variable, position + 1);
-      }
-    }
-    solver.clause(differs, size);
-  }
-
   private int value(int variable) {
-    return integers.valueAt(variable, integers.position(variable, solver.truth()));
+    return integers.value(variable, solver.truth());
   }
 
   private void report() {

@@ -21,6 +21,15 @@ public interface Backend {
   }
 
   /**
+   * Looks for the program that runs with these settings start, and tries it out; a backend that
+   * starts none is not asked. Those that start one have a setting of kind {@link
+   * Setting.Kind#COMMAND}.
+   */
+  default Probe probe(Settings settings, Programs programs) {
+    throw new UnsupportedOperationException(describe().name() + " starts no program");
+  }
+
+  /**
    * Makes of {@code model} what the solver reads. Lowers {@link Model#lowered()} only.
    *
    * @param model already permuted for the seed: adapters do not shuffle

@@ -26,7 +26,9 @@ public record Setting(
     SWITCH,
     INTEGER,
     REAL,
-    CHOICE
+    CHOICE,
+    /** A program and its arguments, with blanks between them. */
+    COMMAND
   }
 
   public Setting {
@@ -60,6 +62,11 @@ public record Setting(
     return new Setting(name, Kind.CHOICE, choices.get(0), 0, 0, choices, help);
   }
 
+  /** A program and its arguments. */
+  public static Setting command(String name, String byDefault, String help) {
+    return new Setting(name, Kind.COMMAND, byDefault, 0, 0, List.of(), help);
+  }
+
   /** What is wrong with {@code text} as a value of this; empty if nothing is. */
   public String mistakeIn(String text) {
     return mistakeIn(kind, text, low, high, choices);
@@ -77,6 +84,10 @@ public record Setting(
           choices.contains(text)
               ? ""
               : "'" + text + "' is not one of " + String.join(", ", choices);
+      case COMMAND ->
+          text.isBlank() || text.chars().anyMatch(Character::isISOControl)
+              ? "a command is one line that is not blank"
+              : "";
     };
   }
 

@@ -8,7 +8,7 @@ import java.util.OptionalLong;
  *
  * @param bound what the objective is proved not to be better than; exact, the constant included
  * @param ended why it returned
- * @param reason for {@link Why#REFUSED}, what the solver said; else empty
+ * @param reason for {@link Why#REFUSED} and {@link Why#FAILED}, what the solver said; else empty
  */
 public record SolveOutcome(Status status, OptionalLong bound, Why ended, String reason) {
   /** Why a solve returned. */
@@ -22,7 +22,9 @@ public record SolveOutcome(Status status, OptionalLong bound, Why ended, String 
     /** A stop was asked. */
     STOPPED,
     /** The solver would not run this model. */
-    REFUSED
+    REFUSED,
+    /** The solver broke off, gave up or answered what cannot be right. */
+    FAILED
   }
 
   public SolveOutcome {

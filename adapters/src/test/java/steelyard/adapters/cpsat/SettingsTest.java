@@ -33,7 +33,7 @@ class SettingsTest {
         switch (setting.kind()) {
           case SWITCH -> setting.defaultText().equals("true") ? "false" : "true";
           case INTEGER -> setting.defaultText().equals("0") ? "1" : "0";
-          case REAL, CHOICE -> "0.5";
+          case REAL, CHOICE, COMMAND -> "0.5";
         };
     SatParameters parameters = Parameters.of(request(Map.of(setting.name(), changed), 0, 1), false);
     assertThat(parameters.getField(field(setting)).toString()).isEqualTo(changed);

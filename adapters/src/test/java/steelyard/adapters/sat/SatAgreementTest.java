@@ -13,6 +13,7 @@ import org.apache.commons.rng.core.source64.SplitMix64;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.FieldSource;
+import steelyard.adapters.sat.encoding.EncodingSettings;
 import steelyard.adapters.spi.AllAssignments;
 import steelyard.adapters.spi.Goal;
 import steelyard.adapters.spi.SmallModels;
@@ -34,7 +35,7 @@ import steelyard.variants.model.sample.RandomRelations;
 /** Solutions and optima of random small models against the judge, on every assignment. */
 class SatAgreementTest {
   private static final Map<String, String> DIAGRAMS = Map.of();
-  private static final Map<String, String> BINARY = Map.of(SatBackend.MOST_EDGES, "0");
+  private static final Map<String, String> BINARY = Map.of(EncodingSettings.MOST_EDGES, "0");
 
   private static final int KINDS = RandomRelations.KINDS.size();
 

@@ -12,6 +12,7 @@ import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.FieldSource;
+import steelyard.adapters.sat.encoding.EncodingSettings;
 import steelyard.adapters.spi.Goal;
 import steelyard.adapters.spi.Lowered;
 import steelyard.adapters.spi.Lowering;
@@ -219,7 +220,7 @@ class SatLoweringTest {
   @Test
   void refusesByNumbers_whenClausesAreTooMany() {
     Lowered lowered =
-        lower(pigeons(8, 9), Map.of(SatBackend.MOST_CLAUSES, "200"), TestDeadline.none());
+        lower(pigeons(8, 9), Map.of(EncodingSettings.MOST_CLAUSES, "200"), TestDeadline.none());
     assertThat(lowered)
         .isInstanceOfSatisfying(
             Refusal.class,

@@ -10,6 +10,7 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import steelyard.harness.local.RunIds;
 import steelyard.harness.local.RunPlan;
+import steelyard.harness.sweep.Builds;
 import steelyard.harness.sweep.Catalogue;
 import steelyard.harness.sweep.Instance;
 import steelyard.harness.sweep.Setup;
@@ -96,12 +97,12 @@ final class CandidateOptions {
   String memory;
 
   /** The run that the options describe. */
-  RunPlan plan(Catalogue catalogue, Goal goal) {
+  RunPlan plan(Catalogue catalogue, Builds builds, Goal goal) {
     SingleChoice.Chosen chosen = SingleChoice.variant(catalogue, family, variant);
     Catalogue.Family known = chosen.family();
     Catalogue.Backend technology = SingleChoice.backend(catalogue, backend);
     Instance data = SingleChoice.instance(known, instance);
-    Setup setup = SingleChoice.setup(catalogue, backend, options, threads, limits(technology));
+    Setup setup = SingleChoice.setup(technology, builds, options, threads, limits(technology));
     Recipe recipe =
         new Recipe(
             known.name(),

@@ -9,6 +9,7 @@ import steelyard.harness.launch.Crew;
 import steelyard.harness.launch.Describing;
 import steelyard.harness.launch.HarnessProblem;
 import steelyard.harness.launch.Installation;
+import steelyard.harness.launch.ProgramBuilds;
 import steelyard.harness.local.RunIds;
 import steelyard.harness.process.CacheFolder;
 import steelyard.harness.process.CoreLeases;
@@ -18,6 +19,7 @@ import steelyard.harness.process.MachineFacts;
 import steelyard.harness.process.StopSignals;
 import steelyard.harness.process.StopSwitch;
 import steelyard.harness.process.Tools;
+import steelyard.harness.sweep.Builds;
 import steelyard.harness.sweep.Catalogue;
 import steelyard.harness.sweep.FamilyJars;
 import steelyard.results.ledger.Session;
@@ -58,6 +60,11 @@ final class Desk implements AutoCloseable {
 
   Catalogue catalogue() {
     return new Describing(crew).catalogue();
+  }
+
+  /** Which build of a backend runs. */
+  Builds builds() {
+    return new ProgramBuilds(crew);
   }
 
   /** A session on this machine; reading its facts takes about a second. */

@@ -98,6 +98,7 @@ final class ListCommand implements Callable<Integer> {
               case CHOICE -> String.join(", ", setting.choices());
               case INTEGER -> Columns.range(setting, true);
               case REAL -> Columns.range(setting, false);
+              case COMMAND -> "a program and its arguments";
             };
         out.println("  " + setting.name() + " = " + setting.defaultText() + "  (" + values + ")");
         Columns.wrapped(out, "      ", setting.help());

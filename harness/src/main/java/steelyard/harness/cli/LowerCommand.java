@@ -55,7 +55,7 @@ final class LowerCommand implements Callable<Integer> {
     }
     PrintWriter out = spec.commandLine().getOut();
     try (Desk desk = Desk.open(shared.jars())) {
-      RunPlan plan = candidate.plan(desk.catalogue(), Goal.optimise());
+      RunPlan plan = candidate.plan(desk.catalogue(), desk.builds(), Goal.optimise());
       Path folder = Files.createTempDirectory("steelyard-lower");
       try {
         RunMaker maker = new RunMaker(desk.crew(), desk.session(MachineFacts.here()), desk.clock());

@@ -62,7 +62,7 @@ final class SolveCommand implements Callable<Integer> {
   public Integer call() throws IOException {
     PrintWriter out = spec.commandLine().getOut();
     try (Desk desk = Desk.open(shared.jars())) {
-      RunPlan plan = candidate.plan(desk.catalogue(), Goal.optimise());
+      RunPlan plan = candidate.plan(desk.catalogue(), desk.builds(), Goal.optimise());
       Path folder = Files.createTempDirectory("steelyard-solve");
       try {
         return solve(desk, plan, folder, out);

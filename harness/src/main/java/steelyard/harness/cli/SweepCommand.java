@@ -60,7 +60,7 @@ final class SweepCommand implements Callable<Integer> {
     PrintWriter out = spec.commandLine().getOut();
     PrintWriter err = spec.commandLine().getErr();
     try (Desk desk = Desk.open(SweepFile.familyJars(file).with(shared.jars()))) {
-      Sweep sweep = SweepFile.read(file, desk.catalogue());
+      Sweep sweep = SweepFile.read(file, desk.catalogue(), desk.builds());
       sweep.remarks().forEach(remark -> err.println(Columns.visible(remark)));
       Plan plan = Plan.of(sweep);
       Holder holder =

@@ -4,8 +4,10 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
+import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.stream.Stream;
@@ -26,6 +28,10 @@ final class CodeDigests {
   private static final String ADAPTERS = "steelyard/adapters/";
   private static final String WORKER = "steelyard/harness/worker/";
 
+  /** Packages of other adapters that an adapter is built on. */
+  private static final Map<String, List<String>> SHARED =
+      Map.of("program", List.of(ADAPTERS + "sat/encoding/"));
+
   private final Installation installation;
 
   CodeDigests(Installation installation) {
@@ -35,11 +41,20 @@ final class CodeDigests {
   /** The adapter, what adapters share, and the libraries of the backend. */
   Digest backend(String adapter) {
     Digester digester = new Digester().add("backend").add(adapter);
-    add(digester, installation.core(), List.of(MODEL, SPI, ADAPTERS + adapter + "/"));
+    List<String> inside = new ArrayList<>(List.of(MODEL, SPI, ADAPTERS + adapter + "/"));
+    inside.addAll(SHARED.getOrDefault(adapter, List.of()));
+    add(digester, installation.core(), inside);
     for (Path jar : installation.libraries().getOrDefault(adapter, List.of())) {
       digester.add(jar.getFileName().toString());
       file(digester, jar);
     }
+    return digest(digester);
+  }
+
+  /** The code of a backend together with the program that it starts. */
+  static Digest with(Digest backend, Path program) {
+    Digester digester = new Digester().add("program").add(backend.hex());
+    file(digester, program);
     return digest(digester);
   }
 

@@ -126,6 +126,7 @@ final class Outcomes {
               ? Ending.TIME_LIMIT
               : Ending.STOPPED;
       case REFUSED -> Ending.UNSUPPORTED;
+      case FAILED -> Ending.CRASHED;
     };
   }
 

@@ -78,6 +78,11 @@ public record Launch(
     return new Launch(run, tag, command, folder, environment, withheld, stdout, stderr, processors);
   }
 
+  /** The same with its output in these files. */
+  public Launch writing(Path output, Path errors) {
+    return new Launch(run, tag, command, folder, environment, withheld, output, errors, cores);
+  }
+
   /** The same with one more variable in the environment. */
   public Launch with(String variable, String value) {
     SortedMap<String, String> more = new TreeMap<>(environment);

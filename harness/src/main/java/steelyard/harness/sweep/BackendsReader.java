@@ -30,12 +30,14 @@ final class BackendsReader {
 
   private final Catalogue catalogue;
   private final Allowances allowances;
+  private final Builds builds;
   private final List<Setup> setups = new ArrayList<>();
   private final Set<String> names = new HashSet<>();
 
-  BackendsReader(Catalogue catalogue, Allowances allowances) {
+  BackendsReader(Catalogue catalogue, Allowances allowances, Builds builds) {
     this.catalogue = catalogue;
     this.allowances = allowances;
+    this.builds = builds;
   }
 
   /** Every setting of every entry, in order. */
@@ -58,6 +60,7 @@ final class BackendsReader {
         .ifPresent(
             backend ->
                 add(
+                    entry,
                     new Entry(backend.name(), backend, unchanged()),
                     Observation.DEFAULT_SETTING,
                     unchanged()));
@@ -95,7 +98,7 @@ final class BackendsReader {
             "for example: {name: " + name + "-2, backend: " + name + ", options: ...}",
             "or several under settings: {" + name + "-a: {...}, ...}");
       } else {
-        add(entry, Observation.DEFAULT_SETTING, entry.common());
+        add(place, entry, Observation.DEFAULT_SETTING, entry.common());
       }
     }
   }
@@ -114,7 +117,7 @@ final class BackendsReader {
     } else if (isDefault && !entry.isRenamed() && !chosen.equals(unchanged())) {
       field.mistake("'default' under the backend's own name has no options; name the entry");
     } else if (field.isNamed(setting)) {
-      add(entry, setting, chosen);
+      add(field, entry, setting, chosen);
     }
   }
 
@@ -191,14 +194,21 @@ final class BackendsReader {
     return false;
   }
 
-  private void add(Entry entry, String setting, Chosen chosen) {
+  private void add(Field place, Entry entry, String setting, Chosen chosen) {
     Catalogue.Backend backend = entry.backend();
     SortedMap<String, String> options = new TreeMap<>();
     backend.settings().forEach(s -> options.put(s.name(), s.defaultText()));
     options.putAll(chosen.options());
+    Builds.Build build;
+    try {
+      build = builds.of(backend, options);
+    } catch (IllegalArgumentException e) {
+      place.mistake(e.getMessage());
+      return;
+    }
     setups.add(
         new Setup(
-            new BackendBuild(entry.name(), backend.name(), backend.version(), backend.code()),
+            new BackendBuild(entry.name(), backend.name(), build.version(), build.code()),
             new steelyard.results.ledger.Setting(setting, options),
             chosen.threads(),
             allowances.of(entry.name(), backend)));

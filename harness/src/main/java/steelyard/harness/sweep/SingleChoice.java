@@ -173,11 +173,17 @@ public final class SingleChoice {
   /**
    * A backend with options over its defaults.
    *
-   * @throws SweepProblem if the backend or an option is unknown, or a value out of its range
+   * @param builds which build of a backend runs
+   * @throws SweepProblem if an option is unknown, a value out of its range, or a program that it
+   *     names cannot be used
    */
   public static Setup setup(
-      Catalogue catalogue, String name, Map<String, String> given, int threads, Limits limits) {
-    Catalogue.Backend backend = backend(catalogue, name);
+      Catalogue.Backend backend,
+      Builds builds,
+      Map<String, String> given,
+      int threads,
+      Limits limits) {
+    String name = backend.name();
     requireKnown(backend, given.keySet());
     SortedMap<String, String> options = new TreeMap<>();
     for (Setting option : backend.settings()) {
@@ -195,12 +201,22 @@ public final class SingleChoice {
             work -> {
               throw unknown("unit of work", work.unit(), backend.workUnits());
             });
+    Builds.Build build = build(builds, backend, options);
     return new Setup(
-        new BackendBuild(name, backend.name(), backend.version(), backend.code()),
+        new BackendBuild(name, name, build.version(), build.code()),
         new steelyard.results.ledger.Setting(
             given.isEmpty() ? Observation.DEFAULT_SETTING : "chosen", options),
         threads,
         limits);
+  }
+
+  private static Builds.Build build(
+      Builds builds, Catalogue.Backend backend, SortedMap<String, String> options) {
+    try {
+      return builds.of(backend, options);
+    } catch (IllegalArgumentException e) {
+      throw new SweepProblem(List.of("backend " + backend.name() + ": " + e.getMessage()));
+    }
   }
 
   /**

@@ -62,6 +62,11 @@ public final class SweepFile {
 
   private SweepFile() {}
 
+  /** The sweep that a file describes, on backends as the catalogue describes them. */
+  public static Sweep read(Path file, Catalogue catalogue) {
+    return read(file, catalogue, Builds.DESCRIBED);
+  }
+
   /**
    * The jars with families that a file names.
    *
@@ -87,14 +92,15 @@ public final class SweepFile {
    * The sweep that a file describes. Reads also the instances that it names.
    *
    * @param file relative paths in it start from its folder
+   * @param builds which build of a backend runs
    * @throws SweepProblem with every mistake in the file, if there is any
    */
-  public static Sweep read(Path file, Catalogue catalogue) {
+  public static Sweep read(Path file, Catalogue catalogue, Builds builds) {
     String shown = file.toString();
     Mistakes mistakes = new Mistakes();
     String text = Utf8.read(file, shown, LARGEST);
     Field root = Field.ofYaml(shown, text, mistakes);
     Path folder = file.toAbsolutePath().getParent();
-    return new SweepReader(catalogue, folder, text, mistakes).read(root);
+    return new SweepReader(catalogue, builds, folder, text, mistakes).read(root);
   }
 }

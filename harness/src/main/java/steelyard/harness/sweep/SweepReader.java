@@ -44,6 +44,7 @@ final class SweepReader {
   private static final int FEW_SEEDS = 5;
 
   private final Catalogue catalogue;
+  private final Builds builds;
   private final Path base;
   private final String text;
   private final Mistakes mistakes;
@@ -52,11 +53,13 @@ final class SweepReader {
   /**
    * A reader.
    *
+   * @param builds which build of a backend runs
    * @param base the folder that relative paths start from
    * @param text the text of the file
    */
-  SweepReader(Catalogue catalogue, Path base, String text, Mistakes mistakes) {
+  SweepReader(Catalogue catalogue, Builds builds, Path base, String text, Mistakes mistakes) {
     this.catalogue = catalogue;
+    this.builds = builds;
     this.base = base;
     this.text = text;
     this.mistakes = mistakes;
@@ -102,7 +105,7 @@ final class SweepReader {
     Optional<Field> backends = keys.required("backends", "backends: [sat, cpsat]");
     int before = mistakes.count();
     List<Setup> setups =
-        backends.map(new BackendsReader(catalogue, allowances)::read).orElse(List.of());
+        backends.map(new BackendsReader(catalogue, allowances, builds)::read).orElse(List.of());
     if (mistakes.count() > before || backends.isEmpty()) {
       return List.of();
     }

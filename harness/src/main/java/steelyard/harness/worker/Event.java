@@ -136,6 +136,14 @@ public sealed interface Event {
   /** A backend that is there. */
   record Backend(steelyard.adapters.spi.Description description) implements Event {}
 
+  /**
+   * A program that a backend would start, tried out.
+   *
+   * @param file its executable file
+   * @param version what it says of itself
+   */
+  record Program(String file, String version) implements Event {}
+
   /** A backend that is known and cannot run here. */
   record Missing(String name, String reason) implements Event {}
 

@@ -77,6 +77,9 @@ final class EventCodec {
       family(family, json);
     } else if (event instanceof Event.Backend backend) {
       backend(backend.description(), json);
+    } else if (event instanceof Event.Program program) {
+      kind(json, "program").writeStringField("file", program.file());
+      json.writeStringField("version", program.version());
     } else if (event instanceof Event.Missing missing) {
       kind(json, "missing").writeStringField("name", missing.name());
       json.writeStringField("reason", missing.reason());
@@ -222,6 +225,7 @@ final class EventCodec {
               fields.map("how", Fields::text));
       case "family" -> readFamily(fields);
       case "backend" -> readBackend(fields);
+      case "program" -> new Event.Program(fields.text("file"), fields.text("version"));
       case "missing" -> new Event.Missing(fields.text("name"), fields.text("reason"));
       case "stated" -> new Event.Stated(fields.text("group"), fields.text("text"));
       case "calibrated" -> new Event.Calibrated(fields.number("nanos"));

@@ -23,6 +23,7 @@ final class Lifeline {
   private final BlockingQueue<String> requests = new LinkedBlockingQueue<>();
   private volatile boolean stopAsked;
   private volatile Thread waiting;
+  private volatile Runnable lastDeed = () -> {};
 
   /** Takes over standard input: whoever reads {@link System#in} from now on reads nothing. */
   static Lifeline take() {
@@ -49,9 +50,22 @@ final class Lifeline {
         requests.add(line);
       }
     } catch (IOException e) {
+      halt();
+    }
+    halt();
+  }
+
+  private void halt() {
+    try {
+      lastDeed.run();
+    } finally {
       Runtime.getRuntime().halt(HARNESS_GONE);
     }
-    Runtime.getRuntime().halt(HARNESS_GONE);
+  }
+
+  /** What is done when the harness is gone, before this process halts. */
+  void beforeHalt(Runnable deed) {
+    lastDeed = deed;
   }
 
   boolean stopAsked() {

@@ -6,6 +6,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.util.Map;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -53,9 +54,16 @@ final class Run {
       events.flush();
       events.phase(Phases.ANSWER);
       events.write(new Event.Result(outcome));
-      if (outcome.ended() == SolveOutcome.Why.REFUSED) {
-        throw new WorkerException(Event.Failure.Kind.UNSUPPORTED, outcome.reason());
-      }
+      requireAnswered(outcome);
+    }
+  }
+
+  private static void requireAnswered(SolveOutcome outcome) {
+    if (outcome.ended() == SolveOutcome.Why.REFUSED) {
+      throw new WorkerException(Event.Failure.Kind.UNSUPPORTED, outcome.reason());
+    }
+    if (outcome.ended() == SolveOutcome.Why.FAILED) {
+      throw new WorkerException(Event.Failure.Kind.BACKEND, outcome.reason());
     }
   }
 
@@ -92,7 +100,8 @@ final class Run {
   private Prepared prepare() {
     events.phase(Phases.LOAD);
     Backend backend = Registry.backend(order.backend());
-    Settings settings = settings(backend.describe());
+    order.work().ifPresent(work -> requireUnit(backend.describe(), work.unit()));
+    Settings settings = settings(backend.describe(), order.settings());
     Optional<Refusal> missing = guarded(backend::load);
     if (missing.isPresent()) {
       throw new WorkerException(Event.Failure.Kind.UNSUPPORTED, missing.get().reason());
@@ -106,10 +115,9 @@ final class Run {
     return new Prepared(backend, settings, model, Seeding.of(model, order.seed()));
   }
 
-  private Settings settings(Description backend) {
-    order.work().ifPresent(work -> requireUnit(backend, work.unit()));
+  static Settings settings(Description backend, Map<String, String> given) {
     try {
-      return Settings.of(backend, order.settings());
+      return Settings.of(backend, given);
     } catch (IllegalArgumentException e) {
       throw new WorkerException(Event.Failure.Kind.BAD_INPUT, e.getMessage(), e);
     }
@@ -130,7 +138,12 @@ final class Run {
 
   private Lowering lower(Prepared prepared, RunDeadline deadline) {
     SolveRequest request =
-        new SolveRequest(prepared.settings(), order.seed(), order.threads(), deadline);
+        new SolveRequest(
+            prepared.settings(),
+            order.seed(),
+            order.threads(),
+            deadline,
+            new RunPrograms(lifeline));
     Monitor monitor = prepared.seeding().monitor(new Telling(prepared.model()));
     Lowered lowered =
         guarded(() -> prepared.backend().lower(prepared.seeding().model(), request, monitor));

@@ -4,8 +4,12 @@ import java.io.IOException;
 import java.net.URISyntaxException;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
 import java.util.TreeMap;
 import steelyard.adapters.spi.Backend;
+import steelyard.adapters.spi.Probe;
+import steelyard.adapters.spi.Refusal;
+import steelyard.adapters.spi.Settings;
 import steelyard.variants.family.Amendment;
 import steelyard.variants.family.Family;
 
@@ -19,6 +23,7 @@ import steelyard.variants.family.Family;
  *   <li>{@code digest FILE}: builds each subject in the file and says its digests
  *   <li>{@code state FILE}: says what the models of the subjects in the file state
  *   <li>{@code judge}: judges the run in each folder that is named on standard input
+ *   <li>{@code probe BACKEND NAME=VALUE...}: tries out the program that the settings name
  *   <li>{@code describe}: says which families and backends there are
  *   <li>{@code calibrate}: times the calibration task
  *   <li>{@code train}: loads what runs need, for an archive of classes
@@ -71,6 +76,7 @@ public final class Worker {
       case "digest" -> digest(Path.of(args.get(1)), events);
       case "state" -> state(Path.of(args.get(1)), events);
       case "judge" -> judge(lifeline);
+      case "probe" -> probe(args.get(1), args.subList(2, args.size()), events, lifeline);
       case "describe" -> describe(events);
       case TRAIN -> describe(events);
       case "calibrate" -> events.write(new Event.Calibrated(Calibration.nanos()));
@@ -120,6 +126,23 @@ public final class Worker {
     } catch (WorkerException | IOException e) {
       String problem = "cannot be judged: " + e.getMessage();
       return new Verdict(0, List.of(problem), "", new TreeMap<>());
+    }
+  }
+
+  private static void probe(
+      String backend, List<String> options, EventWriter events, Lifeline lifeline) {
+    Map<String, String> given = new TreeMap<>();
+    for (String option : options) {
+      int equals = option.indexOf('=');
+      given.put(option.substring(0, equals), option.substring(equals + 1));
+    }
+    Backend technology = Registry.backend(backend);
+    Settings settings = Run.settings(technology.describe(), given);
+    Probe probe = technology.probe(settings, new RunPrograms(lifeline));
+    if (probe instanceof Probe.Usable usable) {
+      events.write(new Event.Program(usable.program().toString(), usable.version()));
+    } else {
+      throw new WorkerException(Event.Failure.Kind.UNSUPPORTED, ((Refusal) probe).reason());
     }
   }
 

@@ -4,6 +4,7 @@ import java.util.Arrays;
 import java.util.function.IntConsumer;
 import steelyard.variants.model.Atom;
 import steelyard.variants.model.Domain;
+import steelyard.variants.model.Ints;
 import steelyard.variants.model.View;
 
 /**
@@ -220,7 +221,7 @@ public final class Integers {
    *
    * @param truth by propositional variable, all clauses of this true
    */
-  public int position(int variable, boolean[] truth) {
+  private int position(int variable, boolean[] truth) {
     int low = 0;
     int high = size(variable) - 1;
     while (low < high) {
@@ -232,5 +233,27 @@ public final class Integers {
       }
     }
     return low;
+  }
+
+  /**
+   * A variable's value.
+   *
+   * @param truth by propositional variable, all clauses of this true
+   */
+  public int value(int variable, boolean[] truth) {
+    return valueAt(variable, position(variable, truth));
+  }
+
+  /** Adds to the clause being written that the variable does not have the value it has in truth. */
+  private void orDiffers(int variable, boolean[] truth) {
+    int position = position(variable, truth);
+    cnf.or(position == 0 ? Cnf.FALSE : -order(variable, position));
+    cnf.or(position + 1 == size(variable) ? Cnf.FALSE : order(variable, position + 1));
+  }
+
+  /** Writes that one of the variables does not have the value that it has in {@code truth}. */
+  public void forbid(Ints variables, boolean[] truth) {
+    variables.stream().forEach(variable -> orDiffers(variable, truth));
+    cnf.end();
   }
 }

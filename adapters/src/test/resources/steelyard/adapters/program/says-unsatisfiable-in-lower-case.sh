@@ -1,0 +1,2 @@
+echo "s unsatisfiable"
+exit 20

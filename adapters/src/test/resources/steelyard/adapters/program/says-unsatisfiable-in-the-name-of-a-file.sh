@@ -1,0 +1,2 @@
+echo "satlib.cnf:4: expected number: s UNSATISFIABLE"
+exit 20
