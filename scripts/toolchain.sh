@@ -1,5 +1,5 @@
-# Sourced by the other scripts: finds a JDK 17 or newer and Maven, installs what is missing where it
-# may, and otherwise says the one command to run.
+# Sourced by the other scripts: finds a JDK 17 or newer, Maven and solver programs, installs what is
+# missing where it may, and otherwise says the one command to run.
 
 root=$(CDPATH='' cd -- "$(dirname -- "$0")/.." && pwd -P)
 me=$(basename -- "$0")
@@ -16,6 +16,26 @@ has_jdk() {
   fi
 }
 
+# Sets as_root to what runs a command as root; false if nothing may.
+may_install() {
+  command -v apt-get >/dev/null 2>&1 || return 1
+  if [ "$(id -u)" -eq 0 ]; then
+    as_root=env
+  elif command -v sudo >/dev/null 2>&1 && sudo -n true 2>/dev/null; then
+    as_root="sudo -n env"
+  else
+    return 1
+  fi
+}
+
+install_packages() {
+  echo "installing $*" >&2
+  # shellcheck disable=SC2086 # the command's words are words of their own
+  $as_root apt-get -qq update >&2 &&
+    $as_root DEBIAN_FRONTEND=noninteractive apt-get -qq -y install --no-install-recommends \
+      "$@" >/dev/null
+}
+
 ensure_toolchain() {
   missing=
   has_jdk || missing="$missing openjdk-17-jdk-headless"
@@ -25,23 +45,30 @@ ensure_toolchain() {
     echo "$me: install a JDK 17 or newer and Maven, then run this again" >&2
     exit 2
   fi
-  if [ "$(id -u)" -eq 0 ]; then
-    as_root=env
-  elif command -v sudo >/dev/null 2>&1 && sudo -n true 2>/dev/null; then
-    as_root="sudo -n env"
-  else
+  if ! may_install; then
     echo "$me: not allowed to install packages; run this, then try again:" >&2
     echo "  sudo apt-get update && sudo apt-get install -y --no-install-recommends$missing" >&2
     exit 2
   fi
-  echo "installing$missing" >&2
   # shellcheck disable=SC2086 # package names are words of their own
-  $as_root apt-get -qq update >&2 &&
-    $as_root DEBIAN_FRONTEND=noninteractive apt-get -qq -y install --no-install-recommends \
-      $missing >/dev/null || {
+  install_packages $missing || {
     echo "$me: could not install$missing" >&2
     exit 2
   }
+}
+
+# Installs the solver programs that the backend 'program' is tested with, where it may; nothing else
+# needs them.
+ensure_solvers() {
+  missing=
+  for solver in cadical picosat; do
+    command -v "$solver" >/dev/null 2>&1 || missing="$missing $solver"
+  done
+  [ -n "$missing" ] || return 0
+  # shellcheck disable=SC2086 # package names are words of their own
+  if ! { may_install && install_packages $missing; }; then
+    echo "$me: goes on without$missing; tests that need them are skipped" >&2
+  fi
 }
 
 # Builds the installation unless no source is newer than it.

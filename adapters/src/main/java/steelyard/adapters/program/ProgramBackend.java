@@ -38,7 +38,7 @@ public final class ProgramBackend implements Backend {
   public Description describe() {
     return new Description(
         NAME,
-        "of the program",
+        "any",
         false,
         false,
         Set.of(Goal.Satisfy.class, Goal.Optimise.class, Goal.Enumerate.class),

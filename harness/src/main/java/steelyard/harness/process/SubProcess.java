@@ -17,6 +17,8 @@ public final class SubProcess {
 
   private final Launcher launcher = Launcher.unnoted(Tools.none());
 
+  private boolean isOver;
+
   /** Who ended a program. */
   public enum End {
     ITSELF,
@@ -44,7 +46,7 @@ public final class SubProcess {
    * @throws IOException if it cannot be started
    */
   public Ended run(Launch launch, BooleanSupplier stop, long mostOutputBytes) throws IOException {
-    RunningProcess child = launcher.start(launch);
+    RunningProcess child = start(launch);
     End end = End.STOPPED;
     try {
       end = await(child, stop, mostOutputBytes);
@@ -54,6 +56,14 @@ public final class SubProcess {
       child.end();
     }
     return new Ended(end, code(child), OutputFile.tail(launch.stderr()));
+  }
+
+  /** None is started that {@link #endAll} does not know. */
+  private synchronized RunningProcess start(Launch launch) throws IOException {
+    if (isOver) {
+      throw new IOException("cannot start " + launch.command().get(0) + ": all were ended");
+    }
+    return launcher.start(launch);
   }
 
   private static End await(RunningProcess child, BooleanSupplier stop, long mostOutputBytes)
@@ -74,8 +84,9 @@ public final class SubProcess {
     return child.code().orElse(-1);
   }
 
-  /** Ends what runs, whoever waits for it. */
-  public void endAll() {
+  /** Ends what runs, whoever waits for it; from now on nothing is started. */
+  public synchronized void endAll() {
+    isOver = true;
     launcher.endAll();
   }
 }

@@ -13,11 +13,13 @@ import java.sql.Statement;
 import java.time.Instant;
 import java.util.List;
 import java.util.stream.Stream;
+import org.junit.jupiter.api.Assumptions;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
+import steelyard.harness.process.SubProcess;
 import steelyard.results.ledger.Holder;
 import steelyard.results.ledger.Ledger;
 import steelyard.results.ledger.Observation;
@@ -173,6 +175,48 @@ class CommandTest {
             "\"counters\":{");
   }
 
+  private static final String SOLVERS =
+      """
+      name: solvers
+      family: faulty-cart
+      variants: [plain]
+      backends:
+        - name: of-debian
+          backend: program
+          settings:
+            one: {command: "%s --seed={seed} {cnf}"}
+            two: {command: "%s -s {seed} {cnf}"}
+      instances: {folder: "%s", names: [even]}
+      limits: {wall: 20 s, memory: 1 GB}
+      """;
+
+  @Test
+  void a_sweep_compares_solver_programs() throws IOException {
+    Assumptions.assumeTrue(SubProcess.find("cadical").isPresent(), "cadical is not installed");
+    Assumptions.assumeTrue(SubProcess.find("picosat").isPresent(), "picosat is not installed");
+    Result result = sweep(SOLVERS.formatted("cadical", "picosat", CARTS));
+    assertThat(result.status()).as(result.err()).isEqualTo(ExitStatus.OK);
+    assertThat(result.out()).contains("plain on of-debian/one", "plain on of-debian/two");
+    try (Ledger ledger = Ledger.read(folder.resolve("a ledger/runs.db"))) {
+      List<Observation> seen = ledger.observations(ledger.plans().sweeps().get(0).id());
+      assertThat(seen).hasSize(2).allMatch(Observation::proved);
+      assertThat(seen.stream().map(o -> ledger.runs().record(o.run()).backend().version()))
+          .doesNotContain("any", "unknown");
+      assertThat(seen.stream().map(o -> ledger.runs().record(o.run()).backend().code()))
+          .doesNotHaveDuplicates();
+      assertThat(ledger.runs().record(seen.get(0).run()).counters()).containsKey("calls");
+    }
+  }
+
+  @Test
+  void a_solver_program_that_is_not_there_isAMistakeAtItsPlace() throws IOException {
+    Result result = sweep(SOLVERS.formatted("cadicall", "picosatt", CARTS));
+    assertThat(result.status()).isEqualTo(ExitStatus.BAD_INPUT);
+    assertThat(result.err())
+        .contains("yaml:8:", "program 'cadicall' is not on the search path; install it, or")
+        .contains("yaml:9:", "program 'picosatt' is not on the search path");
+  }
+
   static Stream<Arguments> mistakes() {
     String even = CARTS.resolve("even").toString();
     return Stream.of(
@@ -217,6 +261,20 @@ class CommandTest {
             List.of(
                 "solve", "faulty-cart", even, "--backend", "sat", "--variant", "plain+overflows"),
             "can pass 2^62 - 1"),
+        Arguments.of(
+            List.of(
+                "solve",
+                "faulty-cart",
+                even,
+                "--backend",
+                "program",
+                "--set",
+                "command=no-such-solver --seed={seed} {cnf}"),
+            "backend program: program 'no-such-solver' is not on the search path"),
+        Arguments.of(
+            List.of(
+                "solve", "faulty-cart", even, "--backend", "program", "--set", "command=cat {cnf}"),
+            "the program does not answer a trial formula as the SAT competitions ask: cat: it"),
         Arguments.of(List.of("sweep", "no such.yaml"), "no such file"),
         Arguments.of(List.of("brief", "--ledger", "no ledger"), "there is no ledger"),
         Arguments.of(List.of("show", "abcd", "--ledger", "no ledger"), "there is no ledger"),

@@ -73,6 +73,7 @@ class WireTest {
             "/a b/c.jar",
             "steelyard.x",
             List.of(new Event.Amendment("a", "implied", "", List.of("b"), List.of()))),
+        new Event.Program("/a b/solver", NASTY),
         new Event.Backend(
             new Description(
                 "sat",
