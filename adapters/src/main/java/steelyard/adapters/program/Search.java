@@ -16,6 +16,9 @@ import steelyard.variants.model.Model;
 
 /** Answers one goal by one call after another, each on a formula with more clauses. */
 final class Search {
+  /** Into so many steps the gap is divided at first; common practice, not tuned. */
+  private static final long FIRST_STEPS = 8;
+
   private final Model model;
   private final ModelEncoder encoded;
   private final Integers integers;
@@ -64,11 +67,11 @@ final class Search {
   }
 
   /**
-   * Asks for something better until there is nothing. How much better doubles while it is found;
-   * after a step that is refuted, which proves a bound, the gap is halved. So the number of calls
-   * grows with the logarithm of the objective's range, and none asks for more than the optimum
-   * itself takes: a target that can be met is no harder than the optimum, one that cannot is
-   * refuted with room to spare.
+   * Asks for something better until there is nothing, in large steps, because every call starts
+   * from nothing. How much better doubles while it is found; after a step that is refuted, which
+   * proves a bound, the gap is halved. So the number of calls grows with the logarithm of the gap,
+   * and none asks for more than the optimum itself takes: a target that can be met is no harder
+   * than the optimum, one that cannot is refuted with room to spare.
    */
   private SolveOutcome optimise(ObjectiveBound bound) throws IOException {
     long low = 0;
@@ -78,7 +81,7 @@ final class Search {
       return outcome(false, answer, OptionalLong.of(bound.value(low)));
     }
     long high = improved(bound, first);
-    long step = 1;
+    long step = (high - low) / FIRST_STEPS + 1;
     boolean halves = false;
     while (low < high) {
       long target = bound.hasLiterals() ? Math.max(low, high - step) : high - 1;
