@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.SortedMap;
 import steelyard.harness.sweep.Builds;
 import steelyard.harness.sweep.Catalogue;
@@ -46,7 +47,7 @@ public final class ProgramBuilds implements Builds {
                 arguments.get(0),
                 arguments,
                 folder,
-                crew.installation().classPath(arguments.get(1)),
+                crew.installation().classPath(arguments.get(1), Optional.empty()),
                 "",
                 HEAP_SHARE,
                 1,
