@@ -21,7 +21,6 @@ import steelyard.adapters.puzzles.Pigeonholes;
 import steelyard.adapters.spi.AllAssignments;
 import steelyard.adapters.spi.Goal;
 import steelyard.adapters.spi.Probe;
-import steelyard.adapters.spi.RandomRelations;
 import steelyard.adapters.spi.Seeding;
 import steelyard.adapters.spi.Settings;
 import steelyard.adapters.spi.SmallModels;
@@ -40,6 +39,7 @@ import steelyard.variants.model.Longs;
 import steelyard.variants.model.Model;
 import steelyard.variants.model.Objective;
 import steelyard.variants.model.judge.RelationJudge;
+import steelyard.variants.model.sample.RandomRelations;
 
 /** Two solvers that Debian packages, where they are installed, against the judge. */
 @ParameterizedClass
