@@ -1,6 +1,8 @@
 package steelyard.adapters;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static steelyard.adapters.Backends.onEach;
+import static steelyard.adapters.Backends.row;
 
 import java.io.IOException;
 import java.io.InputStream;
@@ -10,9 +12,7 @@ import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.OptionalLong;
-import java.util.ServiceLoader;
 import java.util.stream.Stream;
-import org.junit.jupiter.api.Named;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
@@ -34,30 +34,6 @@ class BackendAnswersTest {
   /** A safety net: no answer here takes nearly as long. */
   private static final long SECONDS = 60;
 
-  private static List<Backend> backends() {
-    List<Backend> backends = new ArrayList<>();
-    ServiceLoader.load(Backend.class).forEach(backends::add);
-    return backends;
-  }
-
-  /** Each row once for each backend, which comes before it and is shown by its name. */
-  private static Stream<Arguments> onEach(Object[]... rows) {
-    return backends().stream()
-        .flatMap(
-            backend ->
-                Stream.of(rows)
-                    .map(
-                        row -> {
-                          List<Object> arguments = new ArrayList<>(List.of(row));
-                          arguments.add(0, Named.of(backend.describe().name(), backend));
-                          return Arguments.of(arguments.toArray());
-                        }));
-  }
-
-  private static Object[] row(Object... cells) {
-    return cells;
-  }
-
   @Test
   void every_backend_that_is_registered_is_found() throws IOException {
     List<String> registered = new ArrayList<>();
@@ -71,9 +47,9 @@ class BackendAnswersTest {
       }
     }
     assertThat(registered).isNotEmpty();
-    assertThat(backends().stream().map(backend -> backend.getClass().getName()))
+    assertThat(Backends.all().stream().map(backend -> backend.getClass().getName()))
         .containsExactlyElementsOf(registered);
-    assertThat(backends().stream().map(backend -> backend.describe().name()))
+    assertThat(Backends.all().stream().map(backend -> backend.describe().name()))
         .doesNotHaveDuplicates();
   }
 
@@ -106,7 +82,7 @@ class BackendAnswersTest {
 
   static Stream<Arguments> variants() {
     return onEach(
-        Shop.of("twins-4x3").variants().map(BackendAnswersTest::row).toArray(Object[][]::new));
+        Shop.of("twins-4x3").variants().map(Backends::row).toArray(Object[][]::new));
   }
 
   @ParameterizedTest
