@@ -81,8 +81,7 @@ class BackendAnswersTest {
   }
 
   static Stream<Arguments> variants() {
-    return onEach(
-        Shop.of("twins-4x3").variants().map(Backends::row).toArray(Object[][]::new));
+    return onEach(Shop.of("twins-4x3").variants().map(Backends::row).toArray(Object[][]::new));
   }
 
   @ParameterizedTest

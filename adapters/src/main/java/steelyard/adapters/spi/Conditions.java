@@ -22,7 +22,7 @@ import steelyard.variants.model.View;
 final class Conditions {
   private final Definer definer;
   private final List<Disjunction> all = new ArrayList<>();
-  private final List<Relation> implied = new ArrayList<>();
+  private final List<Relation> also = new ArrayList<>();
 
   Conditions(Definer definer) {
     this.definer = definer;
@@ -71,13 +71,13 @@ final class Conditions {
     }
   }
 
-  /** What follows from the conditions, said beside them. */
-  void imply(Relation relation) {
-    implied.add(relation);
+  /** A relation to assert where the conditions are asserted; a truth follows without it. */
+  void also(Relation relation) {
+    also.add(relation);
   }
 
-  List<Relation> implied() {
-    return implied;
+  List<Relation> also() {
+    return also;
   }
 
   /** Clauses that are all true exactly where the conditions are. */
@@ -108,7 +108,7 @@ final class Conditions {
       }
     }
     if (mode != Conditional.Mode.ONLY_IF && definer.mayBe(when)) {
-      implied.forEach(each -> asserted.add(conditional(when, Conditional.Mode.IF, each)));
+      also.forEach(each -> asserted.add(conditional(when, Conditional.Mode.IF, each)));
     }
     return asserted;
   }

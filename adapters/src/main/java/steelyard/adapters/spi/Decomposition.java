@@ -1,6 +1,7 @@
 package steelyard.adapters.spi;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import steelyard.variants.model.Absolute;
 import steelyard.variants.model.AllDifferent;
@@ -65,7 +66,7 @@ public final class Decomposition implements RelationVisitor<String> {
     Decomposition it = new Decomposition(fresh);
     String how = relation.accept(it);
     List<Clause> holds = it.conditions.clauses();
-    return new Truth(how, it.definer.definitions(), holds, it.conditions.implied());
+    return new Truth(how, it.definer.definitions(), holds, it.conditions.also());
   }
 
   /** The constraint that {@code relation} holds, in simpler ones. */
@@ -73,8 +74,18 @@ public final class Decomposition implements RelationVisitor<String> {
     return of(new Conditional(Atom.TRUE, Conditional.Mode.IF, relation), fresh);
   }
 
-  /** The constraint in simpler ones. */
+  /**
+   * The constraint in simpler ones. Of a relation that must hold, these may be some that could not
+   * say that it does not.
+   */
   public static Reduction of(Conditional constraint, Fresh fresh) {
+    boolean isPosted =
+        constraint.when().equals(Atom.TRUE) && constraint.mode() != Conditional.Mode.ONLY_IF;
+    Optional<Reduction> posted = isPosted ? Posted.of(constraint.then(), fresh) : Optional.empty();
+    return posted.orElseGet(() -> conditional(constraint, fresh));
+  }
+
+  private static Reduction conditional(Conditional constraint, Fresh fresh) {
     Decomposition it = new Decomposition(fresh);
     String how = constraint.then().accept(it);
     List<Constraint> asserted = it.conditions.under(constraint.when(), constraint.mode());

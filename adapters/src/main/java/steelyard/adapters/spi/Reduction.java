@@ -6,12 +6,13 @@ import steelyard.variants.model.Constraint;
 import steelyard.variants.model.Definition;
 
 /**
- * A constraint said with total definitions and simpler constraints.
+ * A constraint said in simpler ones, over its variables and fresh ones, of which a solution leaves
+ * each one value.
  *
  * @param how the decomposition's name and published source
- * @param definitions of fresh variables, as in {@link Truth}
+ * @param definitions of fresh variables, as in {@link Truth}; others are bound by what is asserted
  * @param asserted what must hold, none where the constraint always does: clauses, linear relations,
- *     what {@link Truth#implied} says, and these under a condition
+ *     allowed tables, all-different, and these under a condition
  */
 public record Reduction(String how, List<Definition> definitions, List<Constraint> asserted) {
   public Reduction {

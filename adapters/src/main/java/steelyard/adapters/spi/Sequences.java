@@ -34,7 +34,7 @@ final class Sequences {
     Automaton automaton = relation.automaton();
     List<View> letters = relation.word().stream().map(view -> letter(view, automaton)).toList();
     List<Unfolding.Step> steps =
-        Unfolding.of(automaton, letters.stream().map(definer::domain).toList());
+        Unfolding.total(automaton, letters.stream().map(definer::domain).toList());
     View state = View.constant(automaton.start());
     for (int i = 0; i < steps.size(); i++) {
       state = after(state, letters.get(i), steps.get(i));

@@ -39,9 +39,9 @@ final class Tours {
         conditions.require(forward.get(i).is(j).negated(), backward.get(j).is(i));
       }
     }
-    conditions.imply(new AllDifferent(forward));
+    conditions.also(new AllDifferent(forward));
     if (forward.size() == backward.size()) {
-      conditions.imply(new AllDifferent(backward));
+      conditions.also(new AllDifferent(backward));
     }
     return "channelling literals (Walsh 2001)";
   }
@@ -60,7 +60,8 @@ final class Tours {
     }
     if (n > 0) {
       conditions.require(walk.get(n).is(0));
-      conditions.imply(new AllDifferent(successors));
+      conditions.also(new AllDifferent(successors));
+      conditions.also(new AllDifferent(Views.of(walk.subList(0, n))));
     }
     return "walk along the successors (Lauriere 1978)";
   }
@@ -88,7 +89,7 @@ final class Tours {
         walk.subList(1, n + 1).stream()
             .map(step -> definer.compare(step, Comparison.EQ, start))
             .toList());
-    conditions.imply(new AllDifferent(successors));
+    conditions.also(new AllDifferent(successors));
     return "walk along the successors (Lauriere 1978)";
   }
 

@@ -18,8 +18,8 @@ import steelyard.variants.model.Relation;
  *     whose index cannot leave the array, an allowed table with one row for each value of the
  *     columns before the last, and a division whose divisor cannot be 0
  * @param holds none where the relation always holds; an empty clause where it never does
- * @param implied what follows from the relation, of its own variables: says nothing new, and helps
- *     backends to see earlier that the relation cannot hold
+ * @param implied what follows where the relation holds: says nothing new, and helps backends to see
+ *     earlier that the relation cannot hold
  */
 public record Truth(
     String how, List<Definition> definitions, List<Clause> holds, List<Relation> implied) {

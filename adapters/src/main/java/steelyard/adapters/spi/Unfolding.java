@@ -2,6 +2,7 @@ package steelyard.adapters.spi;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.Set;
 import java.util.TreeSet;
@@ -31,15 +32,27 @@ final class Unfolding {
    * One letter's part.
    *
    * @param states after the letter
-   * @param rows state before, letter, state after: one for each state and letter
+   * @param rows state before, letter, state after
    */
   record Step(Domain states, Tuples rows) {}
 
-  static List<Step> of(Automaton automaton, List<Domain> letters) {
+  /** Total: each step has a row for each state and letter. */
+  static List<Step> total(Automaton automaton, List<Domain> letters) {
+    return of(automaton, letters).steps();
+  }
+
+  /** Steps that lead to what is accepted; none where nothing is. */
+  static Optional<List<Step>> accepted(Automaton automaton, List<Domain> letters) {
+    Unfolding it = of(automaton, letters);
+    boolean isEmpty = it.live.stream().anyMatch(Set::isEmpty);
+    return isEmpty ? Optional.empty() : Optional.of(it.liveSteps());
+  }
+
+  private static Unfolding of(Automaton automaton, List<Domain> letters) {
     Unfolding it = new Unfolding(automaton, letters);
     it.reach();
     it.retain();
-    return it.steps();
+    return it;
   }
 
   /** Stands for every state from which nothing can be accepted any more. */
@@ -79,6 +92,17 @@ final class Unfolding {
       }
       Domain states = Domain.of(rows.stream().mapToInt(row -> row[2]));
       lost = states.contains(sink(automaton));
+      steps.add(new Step(states, Tuples.of(3, rows)));
+    }
+    return steps;
+  }
+
+  private List<Step> liveSteps() {
+    List<Step> steps = new ArrayList<>();
+    for (int i = 0; i < letters.size(); i++) {
+      List<int[]> rows = rows(i);
+      rows.removeIf(row -> row[2] == sink(automaton));
+      Domain states = Domain.of(live.get(i + 1).stream().mapToInt(Integer::intValue));
       steps.add(new Step(states, Tuples.of(3, rows)));
     }
     return steps;

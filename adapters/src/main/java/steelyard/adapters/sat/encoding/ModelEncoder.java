@@ -14,7 +14,6 @@ import steelyard.adapters.spi.Sizes;
 import steelyard.variants.model.Clause;
 import steelyard.variants.model.Conditional;
 import steelyard.variants.model.Constraint;
-import steelyard.variants.model.Definition;
 import steelyard.variants.model.Domain;
 import steelyard.variants.model.Linear;
 import steelyard.variants.model.Longs;
@@ -45,6 +44,9 @@ public final class ModelEncoder {
 
   private long clausesBeforePostings;
 
+  /** How many of the model's variables and of fresh ones have been looked at. */
+  private int declared;
+
   /** What is being written. */
   private String at = "";
 
@@ -67,6 +69,7 @@ public final class ModelEncoder {
     this.relations = new RelationEncoder(cnf, integers, linear);
     this.fresh = root.isPresent() ? Fresh.beside(root.get()) : Fresh.beside(model.variables());
     this.byPosting = new long[model.postings().size()];
+    this.declared = model.variables().size();
   }
 
   /** An encoder of the same formula into another sink. */
@@ -192,10 +195,10 @@ public final class ModelEncoder {
   }
 
   private void encode(Reduction reduction) {
-    for (Definition definition : reduction.definitions()) {
-      integers.add(definition.variable(), fresh.domain(definition.variable()));
-      encode(definition.constraint());
+    for (; declared < fresh.size(); declared++) {
+      integers.add(declared, fresh.domain(declared));
     }
+    reduction.definitions().forEach(definition -> encode(definition.constraint()));
     reduction.asserted().forEach(this::encode);
   }
 
