@@ -99,7 +99,8 @@ record Entry(
   Entry requireFields(List<String> needed, String... optional) {
     List<String> known = new ArrayList<>(needed);
     known.addAll(List.of(optional));
-    String all = known.stream().collect(Collectors.joining(", ", "; a " + keyword + " has ", ""));
+    String fieldsOfIt = known.isEmpty() ? "nothing but its name" : String.join(", ", known);
+    String all = "; a " + keyword + " has " + fieldsOfIt;
     for (String field : fields.keySet()) {
       if (!known.contains(field)) {
         throw problem("no field '" + shown(field) + "'" + all);

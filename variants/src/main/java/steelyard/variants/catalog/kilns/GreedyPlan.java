@@ -3,7 +3,9 @@ package steelyard.variants.catalog.kilns;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import steelyard.variants.model.Ints;
@@ -17,18 +19,21 @@ import steelyard.variants.model.Ints;
 final class GreedyPlan {
   private final Campaign campaign;
   private final Calendar calendar;
+
+  /** By kiln, in order. */
   private final List<List<Batch>> batches = new ArrayList<>();
-  private final int[] out;
+
+  /** By lot, where it is. */
+  private final Map<Integer, Batch> batchOf = new TreeMap<>();
 
   private GreedyPlan(Campaign campaign) {
     this.campaign = campaign;
     this.calendar = new Calendar(campaign);
-    this.out = new int[campaign.lots().size()];
     campaign.kilns().forEach(kiln -> batches.add(new ArrayList<>()));
   }
 
   /** A firing that is planned. */
-  private record Batch(int kiln, int position, int heat, int start, int end, List<Integer> lots) {}
+  private record Batch(int kiln, int position, int heat, int start, int end) {}
 
   /** Somewhere for lots to go, and what that adds to the cost. */
   private record Way(Batch batch, boolean isNew, long cost) {}
@@ -97,8 +102,7 @@ final class GreedyPlan {
       batches.get(batch.kiln).add(batch);
       calendar.book(batch.start, batch.heat);
     }
-    batch.lots.addAll(lots);
-    lots.forEach(lot -> out[lot] = batch.end);
+    lots.forEach(lot -> batchOf.put(lot, batch));
   }
 
   private Stream<Way> ways(List<Integer> lots) {
@@ -130,7 +134,7 @@ final class GreedyPlan {
             heat -> {
               int start = calendar.earliest(kiln, heat, Math.max(free, ready(lots)));
               int end = start + campaign.heat(heat).days();
-              Batch batch = new Batch(index, position, heat, start, end, new ArrayList<>());
+              Batch batch = new Batch(index, position, heat, start, end);
               long cost =
                   kiln.fuelAt(heat) + campaign.change(kiln, from, heat) + lateness(lots, end);
               return end <= campaign.works().days() && fits(lots, batch)
@@ -149,7 +153,7 @@ final class GreedyPlan {
     int decorated =
         campaign.seconds().stream()
             .filter(pair -> lots.contains(pair.second()))
-            .mapToInt(pair -> out[pair.first()] + pair.days())
+            .mapToInt(pair -> batchOf.get(pair.first()).end + pair.days())
             .max()
             .orElse(0);
     return Math.max(dry, decorated);
@@ -164,7 +168,7 @@ final class GreedyPlan {
 
   private boolean fits(List<Integer> lots, Batch batch) {
     Kiln kiln = campaign.kilns().get(batch.kiln);
-    List<Lot> all = Stream.concat(batch.lots.stream(), lots.stream()).map(campaign::lot).toList();
+    List<Lot> all = Stream.concat(lotsIn(batch), lots.stream().map(campaign::lot)).toList();
     return batch.start >= ready(lots)
         && lots.stream().map(campaign::lot).allMatch(lot -> isInTime(lot, batch))
         && all.stream().mapToInt(Lot::shelves).sum() <= kiln.shelves()
@@ -187,7 +191,13 @@ final class GreedyPlan {
     int position = batch.position + step;
     return position < 0 || position >= batches.get(batch.kiln).size()
         ? List.of()
-        : batches.get(batch.kiln).get(position).lots.stream().map(campaign::lot).toList();
+        : lotsIn(batches.get(batch.kiln).get(position)).toList();
+  }
+
+  private Stream<Lot> lotsIn(Batch batch) {
+    return batchOf.entrySet().stream()
+        .filter(entry -> entry.getValue().equals(batch))
+        .map(entry -> campaign.lot(entry.getKey()));
   }
 
   private Plan made() {
@@ -200,7 +210,10 @@ final class GreedyPlan {
         Batch batch = batches.get(firing.kiln()).get(firing.position());
         heats[firing.index()] = batch.heat;
         starts[firing.index()] = batch.start;
-        batch.lots.forEach(lot -> firingOf[lot] = firing.index());
+        campaign
+            .lotNumbers()
+            .filter(lot -> batchOf.get(lot).equals(batch))
+            .forEach(lot -> firingOf[lot] = firing.index());
       }
     }
     return new Plan(Ints.of(firingOf), Ints.of(heats), Ints.of(starts));
