@@ -7,7 +7,9 @@ import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 
 class BinBoundTest {
-  /** At least the total over the capacity, at most an optimum (Martello and Toth 1990, section 3). */
+  /**
+   * At least the total over the capacity, at most an optimum (Martello and Toth 1990, section 3).
+   */
   @Test
   void lies_between_the_continuous_bound_and_the_optimum() {
     SplittableRandom random = new SplittableRandom(11);

@@ -76,12 +76,10 @@ class BookedPlanTest {
   @Test
   void says_so_whenGiven_a_kiln_that_cannot_take_the_lot() {
     Lot hot = new Lot("L3", 1, false, 2, 2, 2, 0, 3, 1, OptionalInt.empty());
-    Campaign campaign =
-        CAMPAIGN.withLots(List.of(CAMPAIGN.lot(0), CAMPAIGN.lot(1), hot));
+    Campaign campaign = CAMPAIGN.withLots(List.of(CAMPAIGN.lot(0), CAMPAIGN.lot(1), hot));
     assertThatExceptionOfType(InstanceException.class)
         .isThrownBy(() -> BookedPlan.read(campaign, source(TEXT)))
-        .withMessage(
-            "text:4: firing B.1: the kiln is not hot enough for lot L3, or too small");
+        .withMessage("text:4: firing B.1: the kiln is not hot enough for lot L3, or too small");
   }
 
   private KnownSolution read(String text) {

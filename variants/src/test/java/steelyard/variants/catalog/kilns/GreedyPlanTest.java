@@ -26,8 +26,8 @@ class GreedyPlanTest {
   }
 
   /**
-   * L1 is due first and costs least in kiln B. L3 would spoil it and goes into A, on the next day as
-   * the crew lights one kiln a day. L2 is decorated too late for that; B is the cheaper to light
+   * L1 is due first and costs least in kiln B. L3 would spoil it and goes into A, on the next day
+   * as the crew lights one kiln a day. L2 is decorated too late for that; B is the cheaper to light
    * again, when it is repaired.
    */
   @Test

@@ -50,8 +50,7 @@ class YesterdaysPlanTest {
   @Test
   void says_nothing_of_new_lots_and_of_kilns_that_are_gone_or_do_not_bear_the_heat() {
     Campaign now = on(103, List.of(BEFORE.lot(2).named("NEW")));
-    Kiln cooler =
-        new Kiln("A", 4, 2, 1, 1, 2, 2, 1, Ints.of(5), List.of());
+    Kiln cooler = new Kiln("A", 4, 2, 1, 1, 2, 2, 1, Ints.of(5), List.of());
     assertThat(YesterdaysPlan.hint(BEFORE, PLAN, now.withKilns(List.of(cooler)))).isEmpty();
   }
 }
