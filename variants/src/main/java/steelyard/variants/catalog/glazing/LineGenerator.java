@@ -50,6 +50,23 @@ final class LineGenerator {
     return generator.line();
   }
 
+  /**
+   * A line with few tiles. Now and then one of its rules is stricter than those that its tiles were
+   * made to keep, so that it may have no plan.
+   *
+   * @param seed equal seeds give equal lines
+   */
+  static GlazeLine smallest(long seed) {
+    GlazeLine line = of(LineRecipe.smallest(seed), seed);
+    if (new SplittableRandom(~seed).nextInt(4) > 0) {
+      return line;
+    }
+    List<Treatment> stricter = new ArrayList<>(line.treatments());
+    Treatment first = stricter.get(0);
+    stricter.set(0, new Treatment(first.most(), first.window() + 1, first.excess()));
+    return new GlazeLine(stricter, line.kinds(), line.changeCost(), line.longestRun());
+  }
+
   private void treatments() {
     for (int t = 0; t < recipe.strict() + recipe.priced(); t++) {
       boolean isStrict = t < recipe.strict();

@@ -9,10 +9,11 @@ import java.util.stream.IntStream;
 final class LineText {
   private LineText() {}
 
-  /** The lines of the file, without comments. */
-  static List<String> of(GlazeLine line) {
+  /** The text of the file, a comment first. */
+  static String of(GlazeLine line, String comment) {
     List<Treatment> treatments = line.treatments();
     List<String> text = new ArrayList<>();
+    text.add("# " + comment);
     text.add(line.slots() + " " + treatments.size() + " " + line.kinds().size());
     text.add(words(treatments.stream().mapToInt(Treatment::most)));
     text.add(words(treatments.stream().mapToInt(Treatment::window)));
@@ -29,7 +30,7 @@ final class LineText {
     if (!line.pricedTreatments().isEmpty()) {
       text.add("excess " + words(treatments.stream().mapToInt(Treatment::excess)));
     }
-    return text;
+    return String.join("\n", text) + "\n";
   }
 
   private static String words(IntStream numbers) {

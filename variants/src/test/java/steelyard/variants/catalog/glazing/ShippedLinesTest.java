@@ -39,7 +39,7 @@ class ShippedLinesTest {
   }
 
   /** The file that the name asks for: recipe, tiles, seed. */
-  private static List<String> made(String name) {
+  private static String made(String name) {
     List<String> words = List.of(name.split("-", -1));
     int tiles = Integer.parseInt(words.get(1));
     LineRecipe recipe =
@@ -50,16 +50,19 @@ class ShippedLinesTest {
           default -> throw new IllegalArgumentException(name);
         };
     long seed = Long.parseLong(words.get(2));
-    List<String> text = new ArrayList<>();
-    text.add("# Made up: " + words.get(0) + ", " + tiles + " tiles, seed " + seed);
-    text.addAll(LineText.of(LineGenerator.of(recipe, seed)));
-    return text;
+    return LineText.of(
+        LineGenerator.of(recipe, seed),
+        "Made up: " + words.get(0) + ", " + tiles + " tiles, seed " + seed);
   }
 
   @Test
   void every_file_is_listed() throws IOException {
     try (Stream<Path> files = Files.list(Lines.SHIPPED)) {
-      assertThat(files.map(file -> file.getFileName().toString()).filter(f -> !f.contains(".")))
+      assertThat(
+              files
+                  .filter(Files::isRegularFile)
+                  .map(file -> file.getFileName().toString())
+                  .filter(name -> !name.contains(".")))
           .containsExactlyInAnyOrderElementsOf(listed().stream().map(Listed::path).toList());
     }
     assertThat(listed()).allMatch(instance -> instance.sets.contains("all"));
@@ -69,7 +72,7 @@ class ShippedLinesTest {
   void what_is_made_up_is_what_the_generator_makes() throws IOException {
     for (Listed instance : listed()) {
       if (instance.isMadeUp()) {
-        assertThat(Files.readAllLines(Lines.SHIPPED.resolve(instance.path)))
+        assertThat(Files.readString(Lines.SHIPPED.resolve(instance.path)))
             .as(instance.path)
             .isEqualTo(made(instance.path));
         assertThat(instance.path).startsWith(instance.type + "-");
